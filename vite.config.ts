@@ -31,7 +31,10 @@ const at = (path: string) => fileURLToPath(new URL(path, import.meta.url))
 
 export default defineConfig({
   root: at('./web'),
-  plugins: [vue(), Components({ dts: false, dirs: [], resolvers: [{ type: 'component', resolve: elementPlusResolver }] })],
+  plugins: [
+    vue(),
+    Components({ dts: false, dirs: [], resolvers: [{ type: 'component', resolve: elementPlusResolver }] }),
+  ],
   build: { outDir: at('./web/dist'), emptyOutDir: true, manifest: true, target: 'es2023' },
   server: { proxy: { '/api': 'http://localhost:4600', '/healthz': 'http://localhost:4600' } },
   test: {

@@ -1,0 +1,104 @@
+import { z } from 'zod'
+import { decimal, money } from './common.ts'
+import { FINISHES, OVERRIDABLE } from '../pricing/line-spec.ts'
+
+const length = z.number().positive().max(30000)
+export const plateSpec = z.strictObject({
+  length: z.number().positive().max(3000),
+  width: z.number().positive().max(3000),
+  thickness: z.number().positive().max(200),
+  holes: z.strictObject({ count: z.int().min(0).max(40), diameter: z.number().min(0).max(150) }),
+})
+export const lineSpec = z.strictObject({
+  mark: z.string().trim().min(1).max(20),
+  quantity: z.int().min(1).max(2000),
+  section: z.string().trim().min(1).max(60),
+  grade: z.string().trim().min(1).max(40),
+  height: length,
+  finish: z.enum(FINISHES),
+  base: plateSpec.nullable(),
+  cap: plateSpec.nullable(),
+  rods: z
+    .strictObject({
+      count: z.int().min(1).max(24),
+      diameter: z.number().positive().max(100),
+      grade: z.string().max(20),
+    })
+    .nullable(),
+  welds: z
+    .array(
+      z.strictObject({
+        where: z.enum(['base', 'cap']),
+        leg: z.number().positive().max(50),
+        length: z.number().positive().max(100000),
+      }),
+    )
+    .max(20),
+  extras: z
+    .array(
+      z.strictObject({
+        description: z.string().trim().min(1).max(120),
+        quantity: z.number().positive().max(100000),
+        unitCost: decimal,
+      }),
+    )
+    .max(20),
+  overrides: z
+    .array(
+      z.strictObject({
+        item: z.enum(OVERRIDABLE),
+        value: decimal,
+        reason: z.string().trim().min(3).max(300),
+      }),
+    )
+    .max(20),
+})
+export type LineSpecDto = z.infer<typeof lineSpec>
+
+/** Shop eyes only. Costs are exact decimals; they never reach a contractor. */
+export const costLine = z.object({
+  key: z.string(),
+  label: z.string(),
+  quantity: decimal,
+  unit: z.string(),
+  rate: decimal,
+  cost: decimal,
+  /** Where the number comes from, in words. */
+  basis: z.string(),
+  overridden: z.object({ computed: decimal, reason: z.string() }).nullable(),
+})
+
+export const pricedLine = z.object({
+  mark: z.string(),
+  quantity: z.int(),
+  section: z.string(),
+  pieceMass: z.number(),
+  unitPrice: money,
+  linePrice: money,
+  /** Shop only. */
+  cost: z
+    .object({
+      lines: z.array(costLine),
+      lineCost: decimal,
+      contingency: decimal,
+      margin: decimal,
+      computedUnitPrice: money,
+      resultingMargin: decimal,
+      belowFloor: z.boolean(),
+    })
+    .optional(),
+})
+export const pricedQuote = z.object({
+  lines: z.array(pricedLine),
+  delivery: z.object({ km: z.number(), trucks: z.int(), price: money, cost: decimal.optional() }),
+  subtotal: money,
+  tax: z.object({ rate: decimal, exempt: z.boolean(), amount: money }),
+  total: money,
+  deposit: money,
+  mass: z.number(),
+  priceBookVersion: z.int(),
+  /** Shop only. */
+  resultingMargin: decimal.optional(),
+  warnings: z.array(z.string()).optional(),
+})
+export type PricedQuoteDto = z.infer<typeof pricedQuote>

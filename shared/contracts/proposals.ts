@@ -1,0 +1,49 @@
+import { z } from 'zod'
+import { money } from './common.ts'
+import { columnCheck, basePlateAnswer } from './checks.ts'
+import { lineSpec, pricedQuote } from './pricing.ts'
+import { lineRequirement } from './requirement.ts'
+import { outline } from './sections.ts'
+
+export const alternative = z.object({
+  section: z.string(),
+  designationSI: z.string(),
+  family: z.string(),
+  /** Why it is shown: `cheapest`, `lightest`, `slimmest` or nothing. */
+  because: z.array(z.enum(['cheapest', 'lightest', 'slimmest', 'soonest'])),
+  utilisation: z.number(),
+  mass: z.number(),
+  depth: z.number(),
+  width: z.number(),
+  unitPrice: money,
+})
+export const proposal = z.object({
+  found: z.literal(true),
+  section: z.string(),
+  designationSI: z.string(),
+  outline,
+  depth: z.number(),
+  width: z.number(),
+  check: columnCheck,
+  base: basePlateAnswer.nullable(),
+  /** How it would be made: the start of the estimator's work. */
+  spec: lineSpec,
+  alternatives: z.array(alternative),
+  /** Why the next lighter shape does not do. */
+  nextLighter: z.object({ section: z.string(), reason: z.string() }).nullable(),
+  /** Of this line alone; tax and delivery as for a quote of one line. */
+  price: pricedQuote,
+})
+export const noProposal = z.object({
+  found: z.literal(false),
+  reason: z.string(),
+  nearest: z.object({ section: z.string(), utilisation: z.number(), needs: z.string() }).nullable(),
+})
+export const proposalBody = lineRequirement.extend({
+  delivery: z.strictObject({ km: z.number().min(0).max(5000) }).optional(),
+  /** Another shape than the cheapest: the one to propose. */
+  section: z.string().trim().min(1).max(60).optional(),
+})
+export const proposalAnswer = z.discriminatedUnion('found', [proposal, noProposal])
+export type ProposalDto = z.infer<typeof proposal>
+export type ProposalAnswerDto = z.infer<typeof proposalAnswer>
