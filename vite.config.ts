@@ -38,6 +38,7 @@ export default defineConfig({
   build: { outDir: at('./web/dist'), emptyOutDir: true, manifest: true, target: 'es2023' },
   server: { proxy: { '/api': 'http://localhost:4600', '/healthz': 'http://localhost:4600' } },
   test: {
+    reporters: ['default', at('./tests/support/closing-line.ts')],
     projects: [
       {
         extends: true,
