@@ -1,0 +1,2 @@
+import { secret } from '../a/a.repo.ts'
+export const b = secret
