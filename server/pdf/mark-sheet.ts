@@ -1,0 +1,86 @@
+import type { QuoteLineDto } from '../../shared/contracts/quotes.ts'
+import { basePlateScene } from '../../shared/drawing/base-plate-scene.ts'
+import type { ColumnDrawing } from '../../shared/drawing/column-drawing.ts'
+import { columnScene } from '../../shared/drawing/column-scene.ts'
+import { describeBasePlate, describeColumn, describeSection } from '../../shared/drawing/describe-column.ts'
+import { columnLegend } from '../../shared/drawing/legend.ts'
+import { sectionScene } from '../../shared/drawing/section-scene.ts'
+import type { UnitSystem } from '../../shared/units/step.ts'
+import { drawScene } from './draw-scene.ts'
+import { factColumns } from './fact-columns.ts'
+import { makeFacts } from './make-facts.ts'
+import { braceSentences, requirementFacts } from './requirement-facts.ts'
+import type { Sheet } from './sheet.ts'
+
+/** Drawn at this part of its size, the elevation's texts are 8 points. */
+const SCALE = 0.8
+const ELEVATION = { width: 350, height: 520 }
+
+/** A mark on a page of its own: drawing, section, base plate, how it is made, and what was asked. */
+export function markSheet(
+  sheet: Sheet,
+  line: QuoteLineDto,
+  pieceMass: number | undefined,
+  system: UnitSystem,
+): void {
+  sheet.newPage()
+  const pieces = line.spec.quantity === 1 ? '1 piece' : `${line.spec.quantity} pieces`
+  sheet.heading(`${line.mark}, ${pieces}`)
+  drawings(sheet, line, system)
+  sheet.heading('How it is made', 3, 70)
+  factColumns(sheet, makeFacts(line, pieceMass, system))
+  sheet.down(8)
+  sheet.heading('What was asked', 3, 70)
+  factColumns(sheet, requirementFacts(line.requirement, system))
+  const braces = braceSentences(line.requirement, system)
+  if (braces.length > 0) {
+    sheet.down(3)
+    sheet.list(braces)
+  }
+}
+
+function drawings(sheet: Sheet, line: QuoteLineDto, system: UnitSystem): void {
+  const top = sheet.y
+  const drawing = columnDrawing(line, system)
+  let bottom = top
+  const right = sheet.left + ELEVATION.width * SCALE + 16
+  if (drawing) {
+    const scene = columnScene({ ...drawing, sheet: ELEVATION })
+    drawScene(sheet, scene, { x: sheet.left, y: top, scale: SCALE }, describeColumn(drawing))
+    const legend = `${columnLegend(drawing, scene.layout).join('; ')}.`
+    const y = top + scene.height * SCALE + 2
+    sheet.tag('Caption', () => sheet.put('label', legend, { y, width: ELEVATION.width * SCALE }))
+    bottom = sheet.y
+  }
+  const x = drawing ? right : sheet.left
+  const section = sectionScene(line.outline, line.depth, line.width, system)
+  const words = describeSection(line.spec.section, line.depth, line.width, system)
+  const caption = (text: string, y: number) =>
+    sheet.tag('Caption', () => sheet.put('subheading', text, { x, y, width: sheet.right - x }))
+  caption('Section', top)
+  drawScene(sheet, section, { x, y: top + 14, scale: SCALE }, words)
+  let y = top + 14 + section.height * SCALE + 14
+  const { base } = line
+  if (base) {
+    const plate = {
+      plate: base.plate,
+      holes: base.holes,
+      positions: base.rods.positions,
+      outline: line.outline,
+      system,
+    }
+    const scene = basePlateScene(plate)
+    caption('Base plate', y)
+    drawScene(sheet, scene, { x, y: y + 14, scale: SCALE * 0.95 }, describeBasePlate(plate))
+    y += 14 + scene.height * SCALE * 0.95
+  }
+  sheet.moveTo(Math.max(bottom, y) + 10)
+}
+
+/** The elevation needs a height and ends; a request by effective lengths alone has none. */
+function columnDrawing(line: QuoteLineDto, system: UnitSystem): ColumnDrawing | undefined {
+  const { height, ends, braces } = line.requirement
+  if (height === undefined || !ends) return undefined
+  const { strong, weak } = line.check.lengths
+  return { height, ends, braces, lengths: { strong, weak }, depth: line.depth, width: line.width, system }
+}

@@ -1,0 +1,66 @@
+import { createRequire } from 'node:module'
+
+const resolve = createRequire(import.meta.url).resolve
+const archivo = (face: string) => resolve(`@expo-google-fonts/archivo/${face}.ttf`)
+const plex = (face: string) => resolve(`@expo-google-fonts/ibm-plex-sans/${face}.ttf`)
+
+const FACES = {
+  read: archivo('400Regular/Archivo_400Regular'),
+  readStrong: archivo('600SemiBold/Archivo_600SemiBold'),
+  reckon: plex('400Regular/IBMPlexSans_400Regular'),
+  reckonStrong: plex('600SemiBold/IBMPlexSans_600SemiBold'),
+}
+type Face = keyof typeof FACES
+
+export const INK = {
+  ink: '#1B2024',
+  soft: '#454B50',
+  faint: '#6B7074',
+  hair: '#A5A6A3',
+  ground: '#E9E7E1',
+  cut: '#D2D0CA',
+  oxide: '#98402B',
+  sheet: '#FFFFFF',
+  fails: '#A1123C',
+} as const
+
+export interface TypeStyle {
+  face: Face
+  size: number
+  colour: string
+}
+
+export const STYLES = {
+  title: { face: 'readStrong', size: 21, colour: INK.ink },
+  heading: { face: 'readStrong', size: 13, colour: INK.ink },
+  subheading: { face: 'readStrong', size: 9.5, colour: INK.ink },
+  body: { face: 'read', size: 9, colour: INK.ink },
+  strong: { face: 'readStrong', size: 9, colour: INK.ink },
+  small: { face: 'read', size: 8, colour: INK.soft },
+  label: { face: 'read', size: 7.5, colour: INK.faint },
+  reckon: { face: 'reckon', size: 8, colour: INK.ink },
+  reckonStrong: { face: 'reckonStrong', size: 8, colour: INK.ink },
+  reckonSoft: { face: 'reckon', size: 8, colour: INK.soft },
+} as const satisfies Record<string, TypeStyle>
+export type StyleName = keyof typeof STYLES
+
+/** Letters that Archivo does not have: Greek but for Ω μ π Δ, combining marks, Cyrillic. */
+const NOT_IN_ARCHIVO = /(?![ΩμπΔ])\p{Script=Greek}|\p{Script=Cyrillic}|\p{M}/u
+
+/** Selects the style's face, or Plex where Archivo would leave a letter blank. */
+export function useStyle(doc: PDFKit.PDFDocument, name: StyleName, text = ''): void {
+  const { face, size, colour } = STYLES[name]
+  const stands: Face = NOT_IN_ARCHIVO.test(text)
+    ? face.endsWith('Strong')
+      ? 'reckonStrong'
+      : 'reckon'
+    : face
+  doc.font(FACES[stands]).fontSize(size).fillColor(colour)
+}
+
+export function useFace(doc: PDFKit.PDFDocument, size: number, colour: string, strong = false): void {
+  doc
+    .font(strong ? FACES.readStrong : FACES.read)
+    .fontSize(size)
+    .fillColor(colour)
+}
