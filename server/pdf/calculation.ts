@@ -71,13 +71,16 @@ function lengthTable(sheet: Sheet, { lengths }: ColumnCheckDto, system: UnitSyst
 }
 
 function checkSteps(sheet: Sheet, check: CheckDto, system: UnitSystem): void {
-  const sizes = `${quantity(check.demand, check.unit, system)} ≤ ${quantity(check.capacity, check.unit, system)}`
-  const says = check.utilisation <= 1 ? 'holds' : 'fails'
+  const holds = check.utilisation <= 1
+  const [demand, capacity] = [check.demand, check.capacity].map((value) =>
+    quantity(value, check.unit, system),
+  )
+  const compared = `${demand} ${holds ? '≤' : '>'} ${capacity}: ${holds ? 'holds' : 'fails'}`
   sheet.heading(`${check.clause}  ${check.title}`, 3, 50)
   sheet.down(-2)
   sheet.paragraph(
-    `${check.utilisation <= 1 ? sizes : sizes.replace('≤', '>')}: ${says}, utilisation ${check.utilisation.toFixed(3)}`,
-    'reckonSoft',
+    `${compared}, utilisation ${check.utilisation.toFixed(3)}`,
+    holds ? 'reckonSoft' : 'reckonFails',
   )
   sheet.down(1)
   const steps = check.steps.map((step): Cell[] => [

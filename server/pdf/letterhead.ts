@@ -8,10 +8,10 @@ import { INK } from './type-style.ts'
 export function letterhead(sheet: Sheet, document: QuoteDocument): void {
   const { shop, quote, issuedOn } = document
   const top = sheet.y
-  sheet.tag('P', () => {
-    sheet.put('heading', shop.name, { y: top })
-    sheet.put('small', [...shop.address, shop.phone, shop.email].join(' · '), { y: top + 19 })
-  })
+  sheet.tag('P', () => sheet.put('heading', shop.name, { y: top }))
+  sheet.tag('P', () =>
+    sheet.put('small', [...shop.address, shop.phone, shop.email].join(' · '), { y: top + 19 }),
+  )
   sheet.down(8)
   sheet.rule(INK.ink, 0.8)
   sheet.down(22)

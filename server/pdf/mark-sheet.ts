@@ -9,7 +9,7 @@ import type { UnitSystem } from '../../shared/units/step.ts'
 import { drawScene } from './draw-scene.ts'
 import { factColumns } from './fact-columns.ts'
 import { makeFacts } from './make-facts.ts'
-import { braceSentences, requirementFacts } from './requirement-facts.ts'
+import { requirementFacts } from './requirement-facts.ts'
 import type { Sheet } from './sheet.ts'
 
 /** Drawn at this part of its size, the elevation's texts are 8 points. */
@@ -27,16 +27,9 @@ export function markSheet(
   const pieces = line.spec.quantity === 1 ? '1 piece' : `${line.spec.quantity} pieces`
   sheet.heading(`${line.mark}, ${pieces}`)
   drawings(sheet, line, system)
-  sheet.heading('How it is made', 3, 70)
-  factColumns(sheet, makeFacts(line, pieceMass, system))
+  factColumns(sheet, makeFacts(line, pieceMass, system), 'How it is made')
   sheet.down(8)
-  sheet.heading('What was asked', 3, 70)
-  factColumns(sheet, requirementFacts(line.requirement, system))
-  const braces = braceSentences(line.requirement, system)
-  if (braces.length > 0) {
-    sheet.down(3)
-    sheet.list(braces)
-  }
+  factColumns(sheet, requirementFacts(line.requirement, system), 'What was asked')
 }
 
 function drawings(sheet: Sheet, line: QuoteLineDto, system: UnitSystem): void {

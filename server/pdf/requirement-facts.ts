@@ -1,5 +1,5 @@
 import type { LineRequirement } from '../../shared/contracts/requirement.ts'
-import { braceInWords } from '../../shared/drawing/describe-column.ts'
+import { braceHolds } from '../../shared/drawing/describe-column.ts'
 import { detailLabel, forceLabel, heightLabel } from '../../shared/drawing/labels.ts'
 import type { UnitSystem } from '../../shared/units/step.ts'
 import type { Fact } from './fact-columns.ts'
@@ -10,6 +10,9 @@ export function requirementFacts(asked: LineRequirement, system: UnitSystem): Fa
   const facts: Fact[] = [['Standard', [asked.standard, asked.method].filter(Boolean).join(', ')]]
   if (asked.height !== undefined) facts.push(['Height', heightLabel(asked.height, system)])
   if (asked.ends) facts.push(['Ends', endsText(asked.ends)])
+  asked.braces.forEach((brace, index) => {
+    facts.push([`Brace ${index + 1}`, braceText(brace, system)])
+  })
   if (asked.lengths) facts.push(['Lengths given', lengthsText(asked.lengths, system)])
   if (asked.required) facts.push(['Required', requiredText(asked.required, system)])
   if (asked.loads) facts.push(['Loads', loadsText(asked.loads, system)])
@@ -24,8 +27,8 @@ export function requirementFacts(asked: LineRequirement, system: UnitSystem): Fa
   return facts
 }
 
-export function braceSentences(asked: LineRequirement, system: UnitSystem): string[] {
-  return asked.braces.map((brace, index) => braceInWords(brace, index, system))
+function braceText(brace: LineRequirement['braces'][number], system: UnitSystem): string {
+  return `at ${heightLabel(brace.height, system)}, holds ${braceHolds(brace)}`
 }
 
 function endsText({ strong, weak }: NonNullable<LineRequirement['ends']>): string {

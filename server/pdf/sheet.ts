@@ -131,10 +131,10 @@ export class Sheet {
     this.group('L', () => {
       for (const item of items) {
         this.room(this.heightOf(style, item, this.width - 12))
-        this.tag('LI', () => {
-          const y = this.doc.y
-          this.put(style, '–', { y, width: 10 })
-          this.put(style, item, { x: this.left + 12, y })
+        const { y } = this.doc
+        this.group('LI', () => {
+          this.tag('Lbl', () => this.put(style, '–', { y, width: 10 }))
+          this.tag('LBody', () => this.put(style, item, { x: this.left + 12, y }))
         })
         this.down(2.5)
       }

@@ -87,8 +87,12 @@ function drawCell(sheet: Sheet, place: Place | undefined, cell: Cell, y: number)
   if (!place) return
   const { text, under } = typeof cell === 'string' ? { text: cell, under: '' } : cell
   const { x, width, align = 'left', style = 'body' } = place
-  sheet.tag('TD', () => {
-    sheet.put(style, text, { x, y, width, align })
-    if (under) sheet.put('label', under, { x, width, align })
+  if (!under) {
+    sheet.tag('TD', () => sheet.put(style, text, { x, y, width, align }))
+    return
+  }
+  sheet.group('TD', () => {
+    sheet.tag('P', () => sheet.put(style, text, { x, y, width, align }))
+    sheet.tag('P', () => sheet.put('label', under, { x, width, align }))
   })
 }

@@ -40,6 +40,7 @@ export const STYLES = {
   label: { face: 'read', size: 7.5, colour: INK.faint },
   reckon: { face: 'reckon', size: 8, colour: INK.ink },
   reckonStrong: { face: 'reckonStrong', size: 8, colour: INK.ink },
+  reckonFails: { face: 'reckonStrong', size: 8, colour: INK.fails },
   reckonSoft: { face: 'reckon', size: 8, colour: INK.soft },
 } as const satisfies Record<string, TypeStyle>
 export type StyleName = keyof typeof STYLES

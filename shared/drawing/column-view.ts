@@ -22,7 +22,7 @@ export function viewMarks(axis: Axis, drawing: ColumnDrawing, layout: ColumnLayo
   const parts = lengths?.segments ?? partsOf(axis, drawing)
   return [
     ...plumbLine(view.x, layout),
-    ...(lengths ? [buckledForm(lengths, view.x, layout)] : []),
+    ...(lengths && lengths.shape.length > 1 ? [buckledForm(lengths, view.x, layout)] : []),
     ...shaftMarks(layout, view, breakHeight(parts)),
     ...footSign(ends.bottom, [view.x, layout.foot], view.halfShaft),
     ...headSign(ends.top, [view.x, layout.head], view.halfShaft),

@@ -37,8 +37,12 @@ export function describeColumn(drawing: ColumnDrawing): string {
 
 /** One brace as a sentence: "Brace 1 at 3.20 m holds the weak axis only; twist is free." */
 export function braceInWords(brace: Brace, index: number, system: UnitSystem): string {
-  const twist = brace.stopsTwist ? 'it stops twist' : 'twist is free'
-  return `Brace ${index + 1} at ${heightLabel(brace.height, system)} holds ${AXES[brace.holds]}; ${twist}.`
+  return `Brace ${index + 1} at ${heightLabel(brace.height, system)} holds ${braceHolds(brace)}.`
+}
+
+/** What a brace holds and what it leaves free: "the weak axis only; twist is free". */
+export function braceHolds({ holds, stopsTwist }: Pick<Brace, 'holds' | 'stopsTwist'>): string {
+  return `${AXES[holds]}; ${stopsTwist ? 'it stops twist' : 'twist is free'}`
 }
 
 export function describeSection(name: string, depth: number, width: number, system: UnitSystem): string {
