@@ -8,7 +8,9 @@ import { table, type Cell } from './table.ts'
 
 /** The calculation of one mark: lengths by both methods, then every check with its steps. */
 export function calculation(sheet: Sheet, line: QuoteLineDto, system: UnitSystem): void {
-  sheet.newPage()
+  // On a page of its own, unless the mark's sheet has just begun another.
+  sheet.down(14)
+  sheet.room(sheet.doc.page.height * 0.5)
   sheet.heading(`Calculation of ${line.mark}, ${line.spec.section}`)
   sheet.paragraph(governingText(line.check), 'reckon')
   sheet.down(8)

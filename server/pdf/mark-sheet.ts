@@ -15,6 +15,9 @@ import type { Sheet } from './sheet.ts'
 /** Drawn at this part of its size, the elevation's texts are 8 points. */
 const SCALE = 0.8
 const ELEVATION = { width: 350, height: 520 }
+/** Height of A4 in points; on a lower sheet the drawings give way to what has to be read below them. */
+const A4 = 842
+const DRAWN = A4 / 2
 
 /** A mark on a page of its own: drawing, section, base plate, how it is made, and what was asked. */
 export function markSheet(
@@ -34,11 +37,13 @@ export function markSheet(
 
 function drawings(sheet: Sheet, line: QuoteLineDto, system: UnitSystem): void {
   const top = sheet.y
+  const fit = 1 - (A4 - sheet.doc.page.height) / DRAWN
+  const scale = SCALE * fit
   const drawing = columnDrawing(line, system)
   let bottom = top
   const right = sheet.left + ELEVATION.width * SCALE + 16
   if (drawing) {
-    const scene = columnScene({ ...drawing, sheet: ELEVATION })
+    const scene = columnScene({ ...drawing, sheet: { ...ELEVATION, height: ELEVATION.height * fit } })
     drawScene(sheet, scene, { x: sheet.left, y: top, scale: SCALE }, describeColumn(drawing))
     const legend = `${columnLegend(drawing, scene.layout).join('; ')}.`
     const y = top + scene.height * SCALE + 2
@@ -51,8 +56,8 @@ function drawings(sheet: Sheet, line: QuoteLineDto, system: UnitSystem): void {
   const caption = (text: string, y: number) =>
     sheet.tag('Caption', () => sheet.put('subheading', text, { x, y, width: sheet.right - x }))
   caption('Section', top)
-  drawScene(sheet, section, { x, y: top + 14, scale: SCALE }, words)
-  let y = top + 14 + section.height * SCALE + 14
+  drawScene(sheet, section, { x, y: top + 14, scale }, words)
+  let y = top + 14 + section.height * scale + 14
   const { base } = line
   if (base) {
     const plate = {
@@ -64,8 +69,8 @@ function drawings(sheet: Sheet, line: QuoteLineDto, system: UnitSystem): void {
     }
     const scene = basePlateScene(plate)
     caption('Base plate', y)
-    drawScene(sheet, scene, { x, y: y + 14, scale: SCALE * 0.95 }, describeBasePlate(plate))
-    y += 14 + scene.height * SCALE * 0.95
+    drawScene(sheet, scene, { x, y: y + 14, scale: scale * 0.95 }, describeBasePlate(plate))
+    y += 14 + scene.height * scale * 0.95
   }
   sheet.moveTo(Math.max(bottom, y) + 10)
 }
@@ -75,5 +80,16 @@ function columnDrawing(line: QuoteLineDto, system: UnitSystem): ColumnDrawing | 
   const { height, ends, braces } = line.requirement
   if (height === undefined || !ends) return undefined
   const { strong, weak } = line.check.lengths
-  return { height, ends, braces, lengths: { strong, weak }, depth: line.depth, width: line.width, system }
+  const { required = 0 } = line.check.values
+  return {
+    height,
+    ends,
+    braces,
+    lengths: { strong, weak },
+    depth: line.depth,
+    width: line.width,
+    compression: required > 0 ? required : undefined,
+    uplift: required < 0 ? -required : undefined,
+    system,
+  }
 }

@@ -143,7 +143,7 @@ export const columnCheck: ColumnCheckDto = {
     },
     torsion: { used: HEIGHT },
   },
-  values: {},
+  values: { required: 1_250_000 },
   checks: [flexural, slenderness],
   assumptions: ['Braces hold translation only and are taken as rigid (AISC 360 Appendix 6).'],
   warnings: [],
