@@ -1,8 +1,8 @@
 import type { CheckDto, ColumnCheckDto } from '../../shared/contracts/checks.ts'
 import type { QuoteLineDto } from '../../shared/contracts/quotes.ts'
 import { computedLengthLabel, heightLabel } from '../../shared/drawing/labels.ts'
+import { formatQuantity, render } from '../../shared/units/render.ts'
 import type { UnitSystem } from '../../shared/units/step.ts'
-import { figure, quantity, substituted } from './figures.ts'
 import type { Sheet } from './sheet.ts'
 import { table, type Cell } from './table.ts'
 
@@ -52,7 +52,7 @@ function lengthTable(sheet: Sheet, { lengths }: ColumnCheckDto, system: UnitSyst
       label(segment),
       label(eigenvalue),
       { text: label(used), under: governedBy === 'segment' ? 'segments govern' : 'eigenvalue governs' },
-      quantity(criticalLoad, 'N', system),
+      formatQuantity(criticalLoad, 'N', system),
     ]
   })
   table(
@@ -75,7 +75,7 @@ function lengthTable(sheet: Sheet, { lengths }: ColumnCheckDto, system: UnitSyst
 function checkSteps(sheet: Sheet, check: CheckDto, system: UnitSystem): void {
   const holds = check.utilisation <= 1
   const [demand, capacity] = [check.demand, check.capacity].map((value) =>
-    quantity(value, check.unit, system),
+    formatQuantity(value, check.unit, system),
   )
   const compared = `${demand} ${holds ? '≤' : '>'} ${capacity}: ${holds ? 'holds' : 'fails'}`
   sheet.heading(`${check.clause}  ${check.title}`, 3, 50)
@@ -88,8 +88,8 @@ function checkSteps(sheet: Sheet, check: CheckDto, system: UnitSystem): void {
   const steps = check.steps.map((step): Cell[] => [
     step.symbol,
     step.expression,
-    substituted(step, system),
-    step.unit === '1' ? figure(step.value) : quantity(step.value, step.unit, system),
+    render(step, system),
+    formatQuantity(step.value, step.unit, system),
   ])
   if (steps.length > 0) {
     table(

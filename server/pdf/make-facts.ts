@@ -1,8 +1,9 @@
 import type { QuoteLineDto } from '../../shared/contracts/quotes.ts'
 import { detailLabel, heightLabel } from '../../shared/drawing/labels.ts'
+import { formatQuantity } from '../../shared/units/render.ts'
 import type { UnitSystem } from '../../shared/units/step.ts'
 import type { Fact } from './fact-columns.ts'
-import { percent, quantity } from './figures.ts'
+import { percent } from './figures.ts'
 import { FINISH_WORDS } from './price-table.ts'
 
 /** How a mark is made, each as a label and its words. */
@@ -16,7 +17,7 @@ export function makeFacts(line: QuoteLineDto, pieceMass: number | undefined, sys
     ['Height made', heightLabel(spec.height, system)],
     ['Finish', FINISH_WORDS[spec.finish]],
   ]
-  if (pieceMass !== undefined) facts.push(['Mass each', quantity(pieceMass, 'kg', system)])
+  if (pieceMass !== undefined) facts.push(['Mass each', formatQuantity(pieceMass, 'kg', system)])
   if (spec.base) facts.push(['Base plate', plateText(spec.base, label)])
   if (spec.cap) facts.push(['Cap plate', plateText(spec.cap, label)])
   if (spec.rods)

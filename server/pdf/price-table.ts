@@ -1,6 +1,6 @@
 import type { QuoteLineDto } from '../../shared/contracts/quotes.ts'
 import { heightLabel } from '../../shared/drawing/labels.ts'
-import { quantity } from './figures.ts'
+import { formatQuantity } from '../../shared/units/render.ts'
 import { dateText, moneyText } from './money-and-dates.ts'
 import type { QuoteDocument } from './quote-document.ts'
 import type { Sheet } from './sheet.ts'
@@ -45,7 +45,7 @@ export function priceTable(sheet: Sheet, { quote, shop }: QuoteDocument): void {
   totals(sheet, quote.current)
   sheet.down(10)
   const until = quote.current.validUntil ? ` until ${dateText(quote.current.validUntil)}` : ''
-  const mass = quantity(price.mass, 'kg', shop.system)
+  const mass = formatQuantity(price.mass, 'kg', shop.system)
   sheet.paragraph(
     `Mass of the whole work ${mass}. The price holds${until}; after that it can only be repriced. To accept, use the ` +
       `private link in the e-mail that brought this quote, under your own name. The deposit of ` +

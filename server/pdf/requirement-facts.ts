@@ -1,9 +1,11 @@
 import type { LineRequirement } from '../../shared/contracts/requirement.ts'
 import { braceHolds } from '../../shared/drawing/describe-column.ts'
 import { detailLabel, forceLabel, heightLabel } from '../../shared/drawing/labels.ts'
+import { figures } from '../../shared/units/figures.ts'
+import { formatQuantity } from '../../shared/units/render.ts'
 import type { UnitSystem } from '../../shared/units/step.ts'
 import type { Fact } from './fact-columns.ts'
-import { figure, percent, quantity } from './figures.ts'
+import { percent } from './figures.ts'
 
 /** What was asked, each as a label and its words; only what was said or assumed. */
 export function requirementFacts(asked: LineRequirement, system: UnitSystem): Fact[] {
@@ -23,7 +25,7 @@ export function requirementFacts(asked: LineRequirement, system: UnitSystem): Fa
   const limits = limitsText(asked.limits, system)
   if (limits) facts.push(['Limits', limits])
   if (asked.base.plate)
-    facts.push(['Concrete', `f'c ${quantity(asked.base.concrete.strength, 'MPa', system)}`])
+    facts.push(['Concrete', `f'c ${formatQuantity(asked.base.concrete.strength, 'MPa', system)}`])
   return facts
 }
 
@@ -48,8 +50,8 @@ function requiredText(required: NonNullable<LineRequirement['required']>, system
   const parts = [
     axial < 0 ? `uplift ${forceLabel(-axial, system)}` : `compression ${forceLabel(axial, system)}`,
   ]
-  if (momentStrong) parts.push(`moment about the strong axis ${quantity(momentStrong, 'N·mm', system)}`)
-  if (momentWeak) parts.push(`moment about the weak axis ${quantity(momentWeak, 'N·mm', system)}`)
+  if (momentStrong) parts.push(`moment about the strong axis ${formatQuantity(momentStrong, 'N·mm', system)}`)
+  if (momentWeak) parts.push(`moment about the weak axis ${formatQuantity(momentWeak, 'N·mm', system)}`)
   return parts.join(', ')
 }
 
@@ -78,7 +80,7 @@ function limitsText(limits: LineRequirement['limits'], system: UnitSystem): stri
   if (limits.families) parts.push(`families ${limits.families.join(', ')}`)
   if (limits.maxDepth) parts.push(`depth to ${detailLabel(limits.maxDepth, system)}`)
   if (limits.maxWidth) parts.push(`width to ${detailLabel(limits.maxWidth, system)}`)
-  if (limits.maxSlenderness) parts.push(`slenderness to ${figure(limits.maxSlenderness)}`)
+  if (limits.maxSlenderness) parts.push(`slenderness to ${figures(limits.maxSlenderness)}`)
   if (limits.maxUtilisation < 1) parts.push(`utilisation to ${percent(limits.maxUtilisation)}`)
   return parts.join(', ')
 }

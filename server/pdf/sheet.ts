@@ -1,4 +1,4 @@
-import { useStyle, type StyleName } from './type-style.ts'
+import { legible, useStyle, type StyleName } from './type-style.ts'
 
 type Element = ReturnType<PDFKit.PDFDocument['struct']>
 export type Align = 'left' | 'right' | 'center'
@@ -92,10 +92,11 @@ export class Sheet {
     text: string,
     { x = this.left, y = this.doc.y, width, align = 'left' }: Placing = {},
   ): void {
-    useStyle(this.doc, style, text)
+    const shown = legible(text)
+    useStyle(this.doc, style, shown)
     // Figures that stand under each other have one width; Plex's always do.
     const features: PDFKit.Mixins.OpenTypeFeatures[] = align === 'right' ? ['tnum'] : []
-    this.doc.text(text, x, y, {
+    this.doc.text(shown, x, y, {
       width: width ?? this.right - x,
       align,
       lineGap: 1.5,
@@ -105,8 +106,9 @@ export class Sheet {
   }
 
   heightOf(style: StyleName, text: string, width: number): number {
-    useStyle(this.doc, style, text)
-    return this.doc.heightOfString(text, { width, lineGap: 1.5 })
+    const shown = legible(text)
+    useStyle(this.doc, style, shown)
+    return this.doc.heightOfString(shown, { width, lineGap: 1.5 })
   }
 
   paragraph(text: string, style: StyleName = 'body', type = 'P'): void {

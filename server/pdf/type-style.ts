@@ -48,6 +48,15 @@ export type StyleName = keyof typeof STYLES
 /** Letters that Archivo does not have: Greek but for Ω μ π Δ, combining marks, Cyrillic. */
 const NOT_IN_ARCHIVO = /(?![ΩμπΔ])\p{Script=Greek}|\p{Script=Cyrillic}|\p{M}/u
 
+const RAISED = '⁰¹²³⁴⁵⁶⁷⁸⁹'
+
+/** Neither face has a raised minus: 10⁻⁶ is written 10^−6 on paper. */
+export function legible(text: string): string {
+  return text.replace(/⁻([⁰¹²³⁴⁵⁶⁷⁸⁹]+)/g, (_, raised: string) => {
+    return `^−${[...raised].map((digit) => RAISED.indexOf(digit)).join('')}`
+  })
+}
+
 /** Selects the style's face, or Plex where Archivo would leave a letter blank. */
 export function useStyle(doc: PDFKit.PDFDocument, name: StyleName, text = ''): void {
   const { face, size, colour } = STYLES[name]

@@ -1,4 +1,5 @@
-import { MM_PER_INCH, N_PER_KIP } from '../units/convert.ts'
+import { MM_PER_INCH } from '../units/convert.ts'
+import { formatQuantity } from '../units/render.ts'
 import type { UnitSystem } from '../units/step.ts'
 
 /** Workshop fractions stop at a sixteenth of an inch. */
@@ -28,9 +29,7 @@ export function shapeLabel(mm: number, system: UnitSystem): string {
 }
 
 export function forceLabel(newtons: number, system: UnitSystem): string {
-  const amount = system === 'US' ? newtons / N_PER_KIP : newtons / 1000
-  const shown = Math.abs(amount) >= 100 ? amount.toFixed(0) : String(Number(amount.toPrecision(3)))
-  return `${shown} ${system === 'US' ? 'kip' : 'kN'}`
+  return formatQuantity(newtons, 'N', system)
 }
 
 function feetAndInches(mm: number): string {

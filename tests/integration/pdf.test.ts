@@ -22,18 +22,18 @@ async function written(name: string, body: Buffer): Promise<string> {
 }
 
 function read(tool: 'pdftotext' | 'pdfinfo' | 'pdffonts', args: string[]): string {
-  return execFileSync(tool, args, { encoding: 'utf8', maxBuffer: 64e6 })
+  return execFileSync(tool, args, { encoding: 'utf8', maxBuffer: 64e6 }).replaceAll('\u00a0', ' ')
 }
 
 describe('the quote on paper', () => {
   let file = ''
   let text = ''
-  let body = Buffer.alloc(0)
+  let body: Buffer = Buffer.alloc(0)
   beforeAll(async () => {
     body = await renderQuoteDocument({ quote: quoteFixture(2), shop: shopDetails, issuedOn })
     expect(body.subarray(0, 5).toString()).toBe('%PDF-')
     file = await written('quote.pdf', body)
-    text = read('pdftotext', ['-layout', file, '-']).replaceAll('\u00a0', ' ')
+    text = read('pdftotext', ['-layout', file, '-'])
   })
 
   it('says who offers what to whom, until when and for how much', () => {

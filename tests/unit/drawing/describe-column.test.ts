@@ -1,11 +1,17 @@
 import { describe, expect, it } from 'vitest'
+import type { ColumnDrawing } from '../../../shared/drawing/column-drawing.ts'
 import { braceInWords, describeBasePlate, describeColumn } from '../../../shared/drawing/describe-column.ts'
 import { columnCheck, HEIGHT } from '../../support/check-fixture.ts'
+
+/** Numbers and units are bound by spaces that do not break; here they are only spaces. */
+function readable(drawing: ColumnDrawing): string {
+  return describeColumn(drawing).replaceAll('\u00a0', ' ')
+}
 
 describe('a column in words', () => {
   it('says what the drawing shows', () => {
     const { strong, weak } = columnCheck.lengths
-    const text = describeColumn({
+    const text = readable({
       height: HEIGHT,
       ends: { strong: { bottom: 'fixed', top: 'guided' }, weak: { bottom: 'pinned', top: 'pinned' } },
       braces: [{ height: 2200, holds: 'weak', stopsTwist: false }],
@@ -18,7 +24,7 @@ describe('a column in words', () => {
       '6.40 m high',
       'Strong axis: foot fixed, head guided (it may move sideways but not turn). Weak axis: foot pinned, head pinned.',
       'Brace 1 at 2.20 m holds the weak axis only; twist is free.',
-      '1250 kN of compression',
+      '1 250 kN of compression',
       'lifted by 40 kN',
       'Strong axis: effective length 5.12 m, the segment method governs; 0.00 m to 6.40 m K 0.80, K·L 5.12 m.',
       'Weak axis: effective length 4.20 m, the eigenvalue method governs',
