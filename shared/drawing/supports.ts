@@ -22,8 +22,10 @@ function wall([x, y]: Point, side: 1 | -1, half: number): Mark[] {
   return [line('support', [x, y - half], [x, y + half]), ...strokes]
 }
 
-function rollers([x, y]: Point, radius: number): Mark[] {
-  return [-8, 0, 8].map((at) => circle('support', [x + at, y], radius))
+/** A stiff plate that rolls along what does not move: `down` is 1 at the foot, -1 at the head. */
+function rollingPlate([x, y]: Point, down: 1 | -1, half: number): Mark[] {
+  const rollers = [-8, 0, 8].map((at) => circle('support', [x + at, y + down * 3.5], 3))
+  return [line('support', [x - half, y], [x + half, y]), ...rollers, ...ground([x, y + down * 7], down, half)]
 }
 
 /**
@@ -48,11 +50,7 @@ export function footSign(condition: EndCondition, [x, y]: Point, halfShaft: numb
     case 'fixed':
       return ground([x, y], 1, Math.max(WALL + 3, halfShaft + 10))
     case 'guided':
-      return [
-        line('support', [x - WALL, y], [x + WALL, y]),
-        ...rollers([x, y + 3.5], 3),
-        ...ground([x, y + 7], 1),
-      ]
+      return rollingPlate([x, y], 1, Math.max(WALL, halfShaft + 4))
     case 'free':
       return []
   }
@@ -83,11 +81,7 @@ export function headSign(condition: EndCondition, [x, y]: Point, halfShaft: numb
     case 'fixed':
       return [...wall([face + 1.5, y + 8], 1, 10), ...wall([x - halfShaft - 1.5, y + 8], -1, 10)]
     case 'guided':
-      return [
-        line('support', [x - WALL, y], [x + WALL, y]),
-        ...rollers([x, y - 3.5], 3),
-        ...ground([x, y - 7], -1),
-      ]
+      return rollingPlate([x, y], -1, Math.max(WALL, halfShaft + 4))
     case 'free':
       return []
   }
