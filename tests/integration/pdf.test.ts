@@ -2,18 +2,25 @@ import { execFileSync } from 'node:child_process'
 import { mkdtemp, rm, writeFile } from 'node:fs/promises'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
+import { fileURLToPath } from 'node:url'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { renderQuoteDocument } from '../../server/pdf/render-quote-document.ts'
+import { createDocumentPress } from '../../server/pdf/document-press.ts'
 import { quoteFixture, shopDetails } from '../support/quote-fixture.ts'
 
 /* Read back by poppler's tools, which share nothing with what wrote the file. */
 
 const issuedOn = '2026-12-01T10:00:00Z'
+const press = createDocumentPress(
+  fileURLToPath(new URL('../../server/pdf/quote-document.worker.ts', import.meta.url)),
+)
 let folder = ''
 beforeAll(async () => {
   folder = await mkdtemp(join(tmpdir(), 'quote-'))
 })
-afterAll(() => rm(folder, { recursive: true }))
+afterAll(async () => {
+  await press.close()
+  await rm(folder, { recursive: true })
+})
 
 async function written(name: string, body: Buffer): Promise<string> {
   const file = join(folder, name)
@@ -30,7 +37,7 @@ describe('the quote on paper', () => {
   let text = ''
   let body: Buffer = Buffer.alloc(0)
   beforeAll(async () => {
-    body = await renderQuoteDocument({ quote: quoteFixture(2), shop: shopDetails, issuedOn })
+    body = await press.renderQuoteDocument({ quote: quoteFixture(2), shop: shopDetails, issuedOn })
     expect(body.subarray(0, 5).toString()).toBe('%PDF-')
     file = await written('quote.pdf', body)
     text = read('pdftotext', ['-layout', file, '-'])
@@ -110,7 +117,7 @@ describe('the quote on paper', () => {
 describe('a long schedule', () => {
   it('goes over to more pages, repeating the head of the table', async () => {
     const shop = { ...shopDetails, paper: 'Letter' as const, system: 'US' as const }
-    const body = await renderQuoteDocument({ quote: quoteFixture(60), shop, issuedOn })
+    const body = await press.renderQuoteDocument({ quote: quoteFixture(60), shop, issuedOn })
     const file = await written('long.pdf', body)
     const text = read('pdftotext', ['-layout', file, '-'])
     const offered = text.split('\f').filter((page) => /Mark\s+Pieces\s+Section/.test(page))
@@ -121,5 +128,23 @@ describe('a long schedule', () => {
     // 1250 kN is 281 kip, 4200 mm is 13.78 ft (1 kip = 4.4482216 kN, 1 ft = 304.8 mm).
     expect(text).toContain('281 kip')
     expect(text).toContain('13.78 ft')
+  })
+})
+
+describe('two quotes at once', () => {
+  it('come out each with its own number', async () => {
+    const other = { ...quoteFixture(1), number: 'Q-2002' }
+    const made = await Promise.all(
+      [quoteFixture(1), other].map((quote) =>
+        press.renderQuoteDocument({ quote, shop: shopDetails, issuedOn }),
+      ),
+    )
+    const titles = await Promise.all(
+      made.map(async (body, index) => read('pdfinfo', [await written(`${index}.pdf`, body)])),
+    )
+    expect(titles.map((info) => /Title:\s+(.*)/.exec(info)?.[1])).toEqual([
+      'Quote Q-1001 B',
+      'Quote Q-2002 B',
+    ])
   })
 })
