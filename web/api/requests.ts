@@ -1,0 +1,28 @@
+import type { BodyInputOf, QueryInputOf } from '../../shared/contracts/operations.ts'
+import { call } from './client.ts'
+
+export type RequestInput = BodyInputOf<'createRequest'>
+
+export const requestKeys = {
+  all: ['requests'] as const,
+  one: (id: string) => ['requests', id] as const,
+}
+
+export function listRequests(query: QueryInputOf<'listRequests'>, signal?: AbortSignal) {
+  return call('listRequests', { query, ...(signal ? { signal } : {}) })
+}
+export function readRequest(id: string) {
+  return call('readRequest', { params: { id } })
+}
+export function createRequest(body: RequestInput, idempotencyKey: string) {
+  return call('createRequest', { body, idempotencyKey })
+}
+export function editRequest(id: string, version: number, body: RequestInput) {
+  return call('editRequest', { params: { id }, body, ifMatch: version })
+}
+export function submitRequest(id: string, version: number) {
+  return call('submitRequest', { params: { id }, ifMatch: version })
+}
+export function withdrawRequest(id: string) {
+  return call('withdrawRequest', { params: { id } })
+}

@@ -1,0 +1,44 @@
+import { defineStore } from 'pinia'
+import { computed, ref } from 'vue'
+import type { PersonDto } from '../../shared/contracts/session.ts'
+import { queryClient } from '../api/query-client.ts'
+import { quoteLink } from '../api/quote-link.ts'
+import * as api from '../api/session.ts'
+
+/** Who is signed in, as the server last said. */
+export const useSessionStore = defineStore('session', () => {
+  const person = ref<PersonDto | null>(null)
+  const demo = ref(false)
+  const role = computed(() => person.value?.role ?? null)
+  let asked: Promise<void> | undefined
+
+  /** Asks once; a guard may wait for it on every way in. */
+  function ready(): Promise<void> {
+    asked ??= api.readSession().then(
+      (answer) => {
+        person.value = answer.person
+        demo.value = answer.demo
+      },
+      () => {
+        asked = undefined
+      },
+    )
+    return asked
+  }
+
+  async function signIn(email: string, password: string): Promise<void> {
+    const answer = await api.signIn({ email, password })
+    quoteLink.forget()
+    queryClient.clear()
+    person.value = answer.person
+    demo.value = answer.demo
+  }
+
+  async function signOut(): Promise<void> {
+    await api.signOut()
+    person.value = null
+    queryClient.clear()
+  }
+
+  return { person, demo, role, ready, signIn, signOut }
+})
