@@ -1,5 +1,6 @@
 import PDFDocument from 'pdfkit'
 import { calculation } from './calculation.ts'
+import { registerFaces } from './faces.ts'
 import { furnish } from './furniture.ts'
 import { letterhead } from './letterhead.ts'
 import { markSheet } from './mark-sheet.ts'
@@ -35,6 +36,7 @@ export function buildQuoteDocument(document: QuoteDocument): Promise<Buffer> {
     doc.on('end', () => resolve(Buffer.concat(pieces)))
     doc.on('error', reject)
   })
+  registerFaces(doc)
   const sheet = new Sheet(doc)
   letterhead(sheet, document)
   sheet.down(14)

@@ -1,16 +1,4 @@
-import { createRequire } from 'node:module'
-
-const resolve = createRequire(import.meta.url).resolve
-const archivo = (face: string) => resolve(`@expo-google-fonts/archivo/${face}.ttf`)
-const plex = (face: string) => resolve(`@expo-google-fonts/ibm-plex-sans/${face}.ttf`)
-
-const FACES = {
-  read: archivo('400Regular/Archivo_400Regular'),
-  readStrong: archivo('600SemiBold/Archivo_600SemiBold'),
-  reckon: plex('400Regular/IBMPlexSans_400Regular'),
-  reckonStrong: plex('600SemiBold/IBMPlexSans_600SemiBold'),
-}
-type Face = keyof typeof FACES
+import { selectFace, type Face } from './faces.ts'
 
 export const INK = {
   ink: '#1B2024',
@@ -60,17 +48,12 @@ export function legible(text: string): string {
 /** Selects the style's face, or Plex where Archivo would leave a letter blank. */
 export function useStyle(doc: PDFKit.PDFDocument, name: StyleName, text = ''): void {
   const { face, size, colour } = STYLES[name]
-  const stands: Face = NOT_IN_ARCHIVO.test(text)
-    ? face.endsWith('Strong')
-      ? 'reckonStrong'
-      : 'reckon'
-    : face
-  doc.font(FACES[stands]).fontSize(size).fillColor(colour)
+  const plex = face.endsWith('Strong') ? 'reckonStrong' : 'reckon'
+  selectFace(doc, NOT_IN_ARCHIVO.test(text) ? plex : face)
+  doc.fontSize(size).fillColor(colour)
 }
 
 export function useFace(doc: PDFKit.PDFDocument, size: number, colour: string, strong = false): void {
-  doc
-    .font(strong ? FACES.readStrong : FACES.read)
-    .fontSize(size)
-    .fillColor(colour)
+  selectFace(doc, strong ? 'readStrong' : 'read')
+  doc.fontSize(size).fillColor(colour)
 }

@@ -1,5 +1,6 @@
 import PDFDocument from 'pdfkit'
 import { describe, expect, it } from 'vitest'
+import { registerFaces } from '../../../server/pdf/faces.ts'
 import { legible, STYLES, useStyle, type StyleName } from '../../../server/pdf/type-style.ts'
 
 /* A face without a letter leaves it blank on paper while text can still be extracted, so the face itself is asked. */
@@ -10,6 +11,7 @@ interface Chosen {
 
 function chosen(style: StyleName, text: string): Chosen['_font'] {
   const doc = new PDFDocument()
+  registerFaces(doc)
   useStyle(doc, style, text)
   return (doc as unknown as Chosen)._font
 }
