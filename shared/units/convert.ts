@@ -14,7 +14,6 @@ export type Branded<U extends string> = number & { readonly [unit]: U }
 export type Millimetres = Branded<'mm'>
 export type Newtons = Branded<'N'>
 export type Megapascals = Branded<'MPa'>
-export type Kilograms = Branded<'kg'>
 
 export function mm(value: number): Millimetres {
   return value as Millimetres
