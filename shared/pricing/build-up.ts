@@ -1,15 +1,14 @@
-import { addFinishMinimum } from './finish-minimum.ts'
-import { costLines, type ExactCostLine } from './cost-lines.ts'
-import { deliveryCost, deliveryWarnings, truckloads } from './delivery.ts'
-import { decimalText, exact, settled, sum, type Exact } from './exact.ts'
+import { readable, type ExactCostLine } from './cost-lines.ts'
+import { costWork } from './cost-work.ts'
+import { deliveryWarnings, priceDelivery } from './delivery.ts'
+import { decimalText, exact, sum, type Exact } from './exact.ts'
 import { add, money, moneyToExact, roundToMoney, type Money } from './money.ts'
 import type { Nest } from './nesting.ts'
 import { nestGreedy } from './nesting-greedy.ts'
 import type { PriceBook } from './price-book.ts'
 import type { LineToPrice, PricedLine, PricedQuote, RackBar } from './priced-quote.ts'
-import { depositOf, marked, resultingMargin, sellLine } from './selling.ts'
-import { shareSteel, steelJobs, type LineWithTakeOff } from './steel-cost.ts'
-import { takeOff } from './take-off.ts'
+import { depositOf, resultingMargin, saleSheet, sellLine } from './selling.ts'
+import type { LineWithTakeOff } from './steel-cost.ts'
 import { validatePricing, type Terms } from './validate-pricing.ts'
 import { priceWarnings } from './warnings.ts'
 
@@ -22,11 +21,6 @@ export interface QuoteToPrice extends Terms {
   nest?: Nest
 }
 
-/** Lines with their quantities: the common start of pricing and of what a solver is to cut. */
-export function measured(lines: readonly LineToPrice[]): LineWithTakeOff[] {
-  return lines.map((line) => ({ ...line, piece: takeOff(line.section, line.spec) }))
-}
-
 /**
  * The price of a quote. Costs are exact decimals; money is rounded half up to the minor unit at the unit price, at
  * the discount off it, at the delivery price and at the tax. `delivery` null: collected by the customer. Refuses
@@ -35,15 +29,7 @@ export function measured(lines: readonly LineToPrice[]): LineWithTakeOff[] {
 export function priceQuote(quote: QuoteToPrice): PricedQuote {
   const { book, delivery, discount, tax, rack = [], nest = nestGreedy } = quote
   validatePricing(book, quote.lines, { delivery, tax, discount })
-  const lines = measured(quote.lines)
-  const { shares, plans } = shareSteel(book, lines, steelJobs(book, lines, rack), nest)
-  const sheets = addFinishMinimum(
-    book,
-    lines.flatMap((line, index) => {
-      const steel = shares[index]
-      return steel ? [costLines(book, line, steel)] : []
-    }),
-  )
+  const { lines, sheets, plans } = costWork(book, quote.lines, rack, nest)
   const priced = lines.map((line, index) => priceLine(book, line, sheets[index] ?? [], exact(discount)))
   const carried = priceDelivery(book, lines, delivery)
   const subtotal = add(money(0, book.currency), ...priced.map(({ linePrice }) => linePrice))
@@ -77,36 +63,20 @@ function priceLine(
   discount: Exact,
 ): PricedLine {
   const lineCost = sum(costs.map(({ cost }) => cost))
-  const { unitPrice, linePrice, sheet } = sellLine(book, spec, lineCost, discount)
+  const sale = sellLine(book, spec, lineCost, discount)
   return {
     mark: spec.mark,
     quantity: spec.quantity,
     section: section.designation,
     pieceMass: piece.pieceMass.toNumber(),
-    unitPrice,
-    linePrice,
+    unitPrice: sale.unitPrice,
+    linePrice: sale.linePrice,
     cost: {
-      lines: costs.map((line) => ({
-        ...line,
-        quantity: decimalText(line.quantity),
-        rate: decimalText(line.rate),
-        cost: decimalText(line.cost),
-      })),
+      lines: costs.map(readable),
       lineCost: decimalText(lineCost),
-      ...sheet,
+      ...saleSheet(book, spec, lineCost, sale),
     },
   }
-}
-
-function priceDelivery(
-  book: PriceBook,
-  lines: readonly LineWithTakeOff[],
-  delivery: Terms['delivery'],
-): { km: number; trucks: number; price: Money; cost: Exact } {
-  const trucks = delivery ? truckloads(book, lines) : 0
-  const km = delivery?.km ?? 0
-  const cost = settled(deliveryCost(book, km, trucks))
-  return { km, trucks, cost, price: roundToMoney(marked(book, cost, exact(book.margin)), book.currency) }
 }
 
 function taxOn(amount: Money, rate: string): Money {

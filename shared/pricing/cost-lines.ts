@@ -3,22 +3,33 @@ import { rodPriceOf, type LinearMinutes, type PriceBook } from './price-book.ts'
 import type { CostLine, OverridableItem } from './priced-quote.ts'
 import type { LineWithTakeOff, SteelShare } from './steel-cost.ts'
 
-/** A cost line with its cost still exact. */
-export interface ExactCostLine extends Omit<CostLine, 'cost' | 'quantity' | 'rate'> {
+/** A cost line with its numbers still exact, and its words only when somebody reads them: screening does not. */
+export interface ExactCostLine extends Omit<
+  CostLine,
+  'label' | 'cost' | 'quantity' | 'rate' | 'basis' | 'overridden'
+> {
+  label: () => string
   quantity: Exact
   rate: Exact
   cost: Exact
+  basis: () => string
+  overridden: { computed: Exact; reason: string } | null
 }
 
-interface Row {
-  key: string
-  label: string
-  quantity: Exact
-  unit: string
-  rate: Exact
-  rateUnit: string
-  basis: string
+export function readable(line: ExactCostLine): CostLine {
+  const { overridden } = line
+  return {
+    ...line,
+    label: line.label(),
+    quantity: decimalText(line.quantity),
+    rate: decimalText(line.rate),
+    cost: decimalText(line.cost),
+    basis: line.basis(),
+    overridden: overridden && { ...overridden, computed: decimalText(overridden.computed) },
+  }
 }
+
+type Row = Omit<ExactCostLine, 'cost' | 'overridden'>
 
 /** Every cost line of a line but the share of the order's least finish charge. Lines that cost nothing are left out. */
 export function costLines(book: PriceBook, line: LineWithTakeOff, steel: SteelShare): ExactCostLine[] {
@@ -44,7 +55,7 @@ function materials(
   const shaftMass = piece.shaftMass.times(spec.quantity)
   const shaft: ExactCostLine = {
     key: 'shaftSteel',
-    label: `Shaft, ${section.designation} ${spec.grade}`,
+    label: () => `Shaft, ${section.designation} ${spec.grade}`,
     quantity: shaftMass,
     unit: 'kg',
     rate: shaftMass.isZero() ? ZERO : steel.cost.div(shaftMass),
@@ -56,28 +67,30 @@ function materials(
   const waste = exact(book.plate.waste)
   const plate = costed({
     key: 'plateSteel',
-    label: `Plate, ${book.plate.grades.join(' or ')}`,
+    label: () => `Plate, ${book.plate.grades.join(' or ')}`,
     quantity: piece.plateMass.times(spec.quantity).times(waste.plus(1)),
     unit: 'kg',
     rate: exact(book.plate.pricePerKg),
     rateUnit: 'per kg',
-    basis: `${spec.quantity} × ${short(piece.plateMass)} kg and ${short(waste.times(100))} % waste`,
+    basis: () => `${spec.quantity} × ${short(piece.plateMass)} kg and ${short(waste.times(100))} % waste`,
   })
   return [shaft, plate, ...rods(book, spec)]
 }
 
 function rods(book: PriceBook, spec: LineWithTakeOff['spec']): ExactCostLine[] {
-  const price = spec.rods && rodPriceOf(book, spec.rods.diameter)
-  if (!spec.rods || !price) return []
+  const { rods: set } = spec
+  const price = set && rodPriceOf(book, set.diameter)
+  if (!set || !price) return []
   return [
     costed({
       key: 'rods',
-      label: `Anchor rods ${short(exact(spec.rods.diameter))} mm, ${spec.rods.grade}`,
-      quantity: exact(spec.rods.count).times(spec.quantity),
+      label: () => `Anchor rods ${short(exact(set.diameter))} mm, ${set.grade}`,
+      quantity: exact(set.count).times(spec.quantity),
       unit: 'each',
       rate: exact(price.each),
       rateUnit: 'each',
-      basis: `${spec.quantity} × ${spec.rods.count} sets of rod, nuts and washers, ${price.diameter} mm in the book`,
+      basis: () =>
+        `${spec.quantity} × ${set.count} sets of rod, nuts and washers, ${price.diameter} mm in the book`,
     }),
   ]
 }
@@ -93,24 +106,24 @@ function labour(book: PriceBook, { spec, piece }: LineWithTakeOff, steel: SteelS
   const fitting = exact(perPiece)
     .plus(exact(eachPlate).times(piece.plates.length))
     .plus(exact(per100kg).times(piece.pieceMass).div(100))
-  const work: [OverridableItem, string, Exact, string][] = [
+  const work: [OverridableItem, string, Exact, () => string][] = [
     [
       'minutes.sawing',
       'Sawing',
       cuts.times(perCut),
-      `${n} cuts and ${short(steel.trimCuts)} trim cuts of ${short(perCut)} min`,
+      () => `${n} cuts and ${short(steel.trimCuts)} trim cuts of ${short(perCut)} min`,
     ],
     [
       'minutes.plateCutting',
       'Plate cutting',
       perPlate(({ edge, thickness }) => edge.times(linear(minutes.plateCutting, thickness))),
-      `${n} × ${short(sum(piece.plates.map(({ edge }) => edge)))} m of edge by thickness`,
+      () => `${n} × ${short(sum(piece.plates.map(({ edge }) => edge)))} m of edge by thickness`,
     ],
     [
       'minutes.drilling',
       'Drilling',
       perPlate(({ holes, thickness }) => linear(minutes.drilling, thickness).times(holes)),
-      `${n} × ${piece.plates.reduce((all, { holes }) => all + holes, 0)} holes by thickness`,
+      () => `${n} × ${piece.plates.reduce((all, { holes }) => all + holes, 0)} holes by thickness`,
     ],
     [
       'minutes.welding',
@@ -118,13 +131,13 @@ function labour(book: PriceBook, { spec, piece }: LineWithTakeOff, steel: SteelS
       sum(
         piece.welds.map(({ leg, length }) => length.times(linear(minutes.welding, exact(leg).pow(2)))),
       ).times(n),
-      `${n} × ${short(sum(piece.welds.map(({ length }) => length)))} m of fillet by leg`,
+      () => `${n} × ${short(sum(piece.welds.map(({ length }) => length)))} m of fillet by leg`,
     ],
     [
       'minutes.fitting',
       'Fitting and handling',
       fitting.times(n),
-      `${n} pieces of ${piece.plates.length} plates and ${short(piece.pieceMass)} kg`,
+      () => `${n} pieces of ${piece.plates.length} plates and ${short(piece.pieceMass)} kg`,
     ],
   ]
   return work.map(([item, label, computed, basis]) => {
@@ -138,21 +151,21 @@ function minutesLine(
   key: string,
   label: string,
   computed: Exact,
-  basis: string,
+  basis: () => string,
   override: { value: string; reason: string } | undefined,
 ): ExactCostLine {
   const minutes = override ? exact(override.value) : settled(computed)
   const rate = exact(book.shopRatePerHour)
   return {
     key,
-    label,
+    label: () => label,
     quantity: minutes,
     unit: 'min',
     rate,
     rateUnit: 'per hour',
     cost: settled(minutes.times(rate).div(60)),
-    basis: override ? `set by hand: ${override.reason}` : basis,
-    overridden: override ? { computed: decimalText(computed), reason: override.reason } : null,
+    basis: override ? () => `set by hand: ${override.reason}` : basis,
+    overridden: override ? { computed, reason: override.reason } : null,
   }
 }
 
@@ -161,16 +174,17 @@ const FINISH_LABELS = { prime: 'Blast and prime', paint: 'Blast and paint', galv
 function finish(book: PriceBook, { spec, piece }: LineWithTakeOff): ExactCostLine[] {
   if (spec.finish === 'none') return []
   const { per, rate } = book.finish.rates[spec.finish]
+  const label = FINISH_LABELS[spec.finish]
   const each = per === 'kg' ? piece.pieceMass : piece.paintedArea
   return [
     costed({
       key: 'finish',
-      label: FINISH_LABELS[spec.finish],
+      label: () => label,
       quantity: each.times(spec.quantity),
       unit: per,
       rate: exact(rate),
       rateUnit: `per ${per}`,
-      basis: `${spec.quantity} × ${short(each)} ${per}`,
+      basis: () => `${spec.quantity} × ${short(each)} ${per}`,
     }),
   ]
 }
@@ -178,12 +192,12 @@ function finish(book: PriceBook, { spec, piece }: LineWithTakeOff): ExactCostLin
 function drawing(book: PriceBook): ExactCostLine {
   return costed({
     key: 'drawing',
-    label: 'Drawing and checking',
+    label: () => 'Drawing and checking',
     quantity: exact(1),
     unit: 'mark',
     rate: exact(book.drawingPerMark),
     rateUnit: 'per mark',
-    basis: 'one mark, however many pieces',
+    basis: () => 'one mark, however many pieces',
   })
 }
 
@@ -191,12 +205,12 @@ function extras({ spec }: LineWithTakeOff): ExactCostLine[] {
   return spec.extras.map(({ description, quantity, unitCost }, index) =>
     costed({
       key: `extra.${index + 1}`,
-      label: description,
+      label: () => description,
       quantity: exact(quantity),
       unit: 'each',
       rate: exact(unitCost),
       rateUnit: 'each',
-      basis: 'added by the estimator, for the whole line',
+      basis: () => 'added by the estimator, for the whole line',
     }),
   )
 }

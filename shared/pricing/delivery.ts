@@ -1,5 +1,7 @@
-import { exact, sum, ZERO, type Exact } from './exact.ts'
+import { exact, settled, sum, ZERO, type Exact } from './exact.ts'
+import { money, roundToMoney, type Money } from './money.ts'
 import type { PriceBook } from './price-book.ts'
+import { marked } from './selling.ts'
 import type { LineWithTakeOff } from './steel-cost.ts'
 
 /**
@@ -16,9 +18,21 @@ export function truckloads(book: PriceBook, lines: readonly LineWithTakeOff[]): 
 }
 
 /** Zone base and kilometres for each truck, currency units. */
-export function deliveryCost(book: PriceBook, km: number, trucks: number): Exact {
-  const each = exact(book.delivery.perKm).times(km).plus(book.delivery.base)
-  return trucks === 0 ? ZERO : each.times(trucks)
+function deliveryCost(book: PriceBook, km: number, trucks: number): Exact {
+  return exact(book.delivery.perKm).times(km).plus(book.delivery.base).times(trucks)
+}
+
+/** `terms` null: the customer collects, and nothing is charged. */
+export function priceDelivery(
+  book: PriceBook,
+  lines: readonly LineWithTakeOff[],
+  terms: { km: number } | null,
+): { km: number; trucks: number; price: Money; cost: Exact } {
+  if (!terms) return { km: 0, trucks: 0, price: money(0, book.currency), cost: ZERO }
+  const trucks = truckloads(book, lines)
+  const cost = settled(deliveryCost(book, terms.km, trucks))
+  const price = roundToMoney(marked(book, cost, exact(book.margin)), book.currency)
+  return { km: terms.km, trucks, price, cost }
 }
 
 export function deliveryWarnings(book: PriceBook, lines: readonly LineWithTakeOff[]): string[] {

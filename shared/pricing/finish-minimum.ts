@@ -22,13 +22,13 @@ export function addFinishMinimum(book: PriceBook, lines: readonly ExactCostLine[
     const place = costs.findIndex(({ key }) => key === 'finish') + 1
     const row: ExactCostLine = {
       key: 'finishMinimum',
-      label: 'Finish, least charge of the order',
+      label: () => 'Finish, least charge of the order',
       quantity: exact(1),
       unit: 'share',
       rate: cost,
       rateUnit: 'share',
       cost,
-      basis: `share of what the order's finishing falls short of ${minimum.toFixed(2)}, by finish cost`,
+      basis: () => `share of what the order's finishing falls short of ${minimum.toFixed(2)}, by finish cost`,
       overridden: null,
     }
     return [...costs.slice(0, place), row, ...costs.slice(place)]

@@ -1,8 +1,16 @@
 import { decimalText, exact, type Exact } from './exact.ts'
-import type { LineSpec } from './line-spec.ts'
+import type { LineSpec, Override } from './line-spec.ts'
 import { compare, money, moneyToDecimal, moneyToExact, roundToMoney, times, type Money } from './money.ts'
 import type { PriceBook } from './price-book.ts'
-import type { LineCost } from './priced-quote.ts'
+import type { LineCost, OverridableItem } from './priced-quote.ts'
+
+export interface Sale {
+  margin: Exact
+  /** Unit price with none set by hand. */
+  computed: Money
+  unitPrice: Money
+  linePrice: Money
+}
 
 /** Cost with contingency and margin: cost × (1 + contingency) ÷ (1 − margin). */
 export function marked(book: PriceBook, cost: Exact, margin: Exact, pieces = 1): Exact {
@@ -23,38 +31,42 @@ export function resultingMargin(book: PriceBook, cost: Exact, price: Exact): Exa
  * (1 + contingency) ÷ (1 − margin), and again after the discount. A unit price set by hand is the price: no discount
  * comes off it.
  */
-export function sellLine(
-  book: PriceBook,
-  spec: LineSpec,
-  cost: Exact,
-  discount: Exact,
-): { unitPrice: Money; linePrice: Money; sheet: Omit<LineCost, 'lines' | 'lineCost'> } {
-  const byHand = (item: 'margin' | 'unitPrice') => spec.overrides.find((one) => one.item === item)
-  const marginSet = byHand('margin')
-  const margin = exact(marginSet?.value ?? book.margin)
+export function sellLine(book: PriceBook, spec: LineSpec, cost: Exact, discount: Exact): Sale {
+  const margin = exact(byHand(spec, 'margin')?.value ?? book.margin)
   const listed = roundToMoney(marked(book, cost, margin, spec.quantity), book.currency)
   const computed = discount.isZero()
     ? listed
     : roundToMoney(moneyToExact(listed).times(exact(1).minus(discount)), book.currency)
-  const priceSet = byHand('unitPrice')
-  const unitPrice = priceSet ? roundToMoney(exact(priceSet.value), book.currency) : computed
-  const linePrice = times(unitPrice, spec.quantity)
+  const set = byHand(spec, 'unitPrice')
+  const unitPrice = set ? roundToMoney(exact(set.value), book.currency) : computed
+  return { margin, computed, unitPrice, linePrice: times(unitPrice, spec.quantity) }
+}
+
+/** How the price of a line came about, for the estimator: computed and set by hand side by side. */
+export function saleSheet(
+  book: PriceBook,
+  spec: LineSpec,
+  cost: Exact,
+  { margin, computed, linePrice }: Sale,
+): Omit<LineCost, 'lines' | 'lineCost'> {
+  const marginSet = byHand(spec, 'margin')
+  const priceSet = byHand(spec, 'unitPrice')
   const resulting = resultingMargin(book, cost, moneyToExact(linePrice))
   return {
-    unitPrice,
-    linePrice,
-    sheet: {
-      contingency: decimalText(exact(book.contingency)),
-      margin: decimalText(margin),
-      marginOverridden: marginSet
-        ? { computed: decimalText(exact(book.margin)), reason: marginSet.reason }
-        : null,
-      computedUnitPrice: computed,
-      unitPriceOverridden: priceSet ? { computed: moneyToDecimal(computed), reason: priceSet.reason } : null,
-      resultingMargin: decimalText(resulting),
-      belowFloor: resulting.lt(book.floorMargin),
-    },
+    contingency: decimalText(exact(book.contingency)),
+    margin: decimalText(margin),
+    marginOverridden: marginSet
+      ? { computed: decimalText(exact(book.margin)), reason: marginSet.reason }
+      : null,
+    computedUnitPrice: computed,
+    unitPriceOverridden: priceSet ? { computed: moneyToDecimal(computed), reason: priceSet.reason } : null,
+    resultingMargin: decimalText(resulting),
+    belowFloor: resulting.lt(book.floorMargin),
   }
+}
+
+function byHand(spec: LineSpec, item: OverridableItem): Override | undefined {
+  return spec.overrides.find((one) => one.item === item)
 }
 
 /** A fraction of the total, rounded up to a whole unit of currency, not below the floor and never above the total. */

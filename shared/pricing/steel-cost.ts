@@ -26,8 +26,7 @@ export interface SteelShare {
   cost: Exact
   /** Trim cuts: one a bar, shared by cut length. */
   trimCuts: Exact
-  bars: number
-  basis: string
+  basis: () => string
 }
 
 /** The cutting to be solved for a quote: one job for each section and grade, in the order of the lines. */
@@ -129,8 +128,7 @@ export function shareSteel(
       shares[index] = {
         cost: costs[place] ?? ZERO,
         trimCuts: trims[place] ?? ZERO,
-        bars: result.barCount,
-        basis: basisOf(job, result),
+        basis: () => basisOf(job, result),
       }
     })
     const { section, grade, input } = job
