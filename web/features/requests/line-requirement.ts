@@ -12,7 +12,7 @@ function given<T extends object>(values: T): { [K in keyof T]?: Exclude<T[K], un
 
 /** A line as the API takes it. */
 export function toRequirement(line: LineDraft): LineRequirementInput {
-  const { loads, look: _look, key: _key } = line
+  const { loads } = line
   const pier =
     line.pierLength && line.pierWidth ? { pier: { length: line.pierLength, width: line.pierWidth } } : {}
   const offset =
