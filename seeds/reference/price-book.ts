@@ -2,7 +2,9 @@ import type { PriceBook } from '../../shared/pricing/price-book.ts'
 import { MM_PER_INCH } from '../../shared/units/convert.ts'
 
 const EIGHTHS = [3, 4, 5, 6, 7, 8, 10, 12, 14, 16, 18, 20]
-const inchPlates = EIGHTHS.map((eighths) => (eighths / 8) * MM_PER_INCH)
+/** To a ten-thousandth of a millimetre, which every inch size here is exact to. */
+const inMillimetres = (inches: number) => Math.round(inches * MM_PER_INCH * 1e4) / 1e4
+const inchPlates = EIGHTHS.map((eighths) => inMillimetres(eighths / 8))
 const metricPlates = [10, 12, 16, 20, 25, 30, 35, 40, 50, 60]
 
 /** The price book that a new shop starts from; invented figures in US dollars. */
@@ -63,10 +65,10 @@ export const DEFAULT_PRICE_BOOK: PriceBook = {
   rods: {
     grades: ['F1554-36'],
     prices: [
-      { diameter: 0.75 * MM_PER_INCH, each: '11.50' },
-      { diameter: 1 * MM_PER_INCH, each: '19.00' },
-      { diameter: 1.25 * MM_PER_INCH, each: '31.00' },
-      { diameter: 1.5 * MM_PER_INCH, each: '46.00' },
+      { diameter: inMillimetres(0.75), each: '11.50' },
+      { diameter: inMillimetres(1), each: '19.00' },
+      { diameter: inMillimetres(1.25), each: '31.00' },
+      { diameter: inMillimetres(1.5), each: '46.00' },
     ],
   },
   cutting: { kerf: 3, endTrim: 10, reusableLength: 900, remnantWorth: '0.60', scrapPerKg: '0.28' },

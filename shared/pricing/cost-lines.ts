@@ -2,6 +2,7 @@ import { decimalText, exact, settled, sum, ZERO, type Exact } from './exact.ts'
 import { rodPriceOf, type LinearMinutes, type PriceBook } from './price-book.ts'
 import type { CostLine, OverridableItem } from './priced-quote.ts'
 import type { LineWithTakeOff, SteelShare } from './steel-cost.ts'
+import { size } from './take-off.ts'
 
 /** A cost line with its numbers still exact, and its words only when somebody reads them: screening does not. */
 export interface ExactCostLine extends Omit<
@@ -84,13 +85,13 @@ function rods(book: PriceBook, spec: LineWithTakeOff['spec']): ExactCostLine[] {
   return [
     costed({
       key: 'rods',
-      label: () => `Anchor rods ${short(exact(set.diameter))} mm, ${set.grade}`,
+      label: () => `Anchor rods ${size(set.diameter)} mm, ${set.grade}`,
       quantity: exact(set.count).times(spec.quantity),
       unit: 'each',
       rate: exact(price.each),
       rateUnit: 'each',
       basis: () =>
-        `${spec.quantity} × ${set.count} sets of rod, nuts and washers, ${price.diameter} mm in the book`,
+        `${spec.quantity} × ${set.count} sets of rod, nuts and washers, ${size(price.diameter)} mm in the book`,
     }),
   ]
 }

@@ -3,6 +3,7 @@ import { money, roundToMoney, type Money } from './money.ts'
 import type { PriceBook } from './price-book.ts'
 import { marked } from './selling.ts'
 import type { LineWithTakeOff } from './steel-cost.ts'
+import { size } from './take-off.ts'
 
 /**
  * Truckloads: the mass by the payload, and never fewer than there are pieces too heavy to share a truck (more than
@@ -41,7 +42,7 @@ export function deliveryWarnings(book: PriceBook, lines: readonly LineWithTakeOf
     const warnings: string[] = []
     if (spec.height > longestPiece) {
       warnings.push(
-        `${spec.mark} is ${spec.height} mm long, a truck takes ${longestPiece} mm: agree its transport apart`,
+        `${spec.mark} is ${size(spec.height)} mm long, a truck takes ${size(longestPiece)} mm: agree its transport apart`,
       )
     }
     if (piece.pieceMass.gt(payload)) {

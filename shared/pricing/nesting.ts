@@ -119,20 +119,19 @@ export function leftOver(stock: NestStock, cuts: readonly number[], input: NestI
  * pieces, since what is left is worth no more than its share. Each piece at the cheapest bar that takes it.
  */
 function boundByLength(input: NestInput, unplaced: NestResult['unplaced']): number {
-  let bound = 0
-  for (const { length, quantity } of input.pieces) {
-    const rates = input.stock
-      .filter((stock) => stock.available !== 0 && fits(length, stock, input))
-      .map((stock) => stock.cost / usable(stock, input))
-    if (rates.length > 0) bound += quantity * taken(length, input) * Math.min(...rates)
-  }
-  for (const { length, quantity } of unplaced) bound -= unplacedShare(input, length, quantity)
-  return Math.max(0, bound)
+  const bounds = input.pieces.map(({ length, quantity }) => quantity * leastCost(input, length))
+  const left = unplaced.map(({ length, quantity }) => -quantity * leastCost(input, length))
+  // Smallest first: the same sum whatever the order of the pieces.
+  const parts = [...bounds, ...left].sort((a, b) => a - b)
+  return Math.max(
+    0,
+    parts.reduce((total, part) => total + part, 0),
+  )
 }
 
-function unplacedShare(input: NestInput, length: number, quantity: number): number {
+function leastCost(input: NestInput, length: number): number {
   const rates = input.stock
     .filter((stock) => stock.available !== 0 && fits(length, stock, input))
     .map((stock) => stock.cost / usable(stock, input))
-  return rates.length > 0 ? quantity * taken(length, input) * Math.min(...rates) : 0
+  return rates.length > 0 ? taken(length, input) * Math.min(...rates) : 0
 }

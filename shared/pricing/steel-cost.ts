@@ -3,7 +3,7 @@ import { minorUnits } from './money.ts'
 import type { Nest, NestInput, NestResult, NestStock } from './nesting.ts'
 import { barPriceOf, type PriceBook } from './price-book.ts'
 import type { LineToPrice, RackBar, SteelPlan } from './priced-quote.ts'
-import type { PricedSection, TakeOff } from './take-off.ts'
+import { size, type PricedSection, type TakeOff } from './take-off.ts'
 
 export interface LineWithTakeOff extends LineToPrice {
   piece: TakeOff
@@ -150,10 +150,10 @@ function cutLength(line: LineWithTakeOff | undefined): Exact {
 function basisOf(job: SteelJob, result: NestResult): string {
   const bars = result.bars.map(({ stock, times, cuts, left }) => {
     const length = job.input.stock[stock]?.length ?? 0
-    return `${times} × ${length} mm bar cut to ${cutsText(cuts)}, ${left} mm left`
+    return `${times} × ${size(length)} mm bar cut to ${cutsText(cuts)}, ${size(left)} mm left`
   })
   const loose = result.unplaced.map(
-    ({ length, quantity }) => `${quantity} × ${length} mm by mass, no bar takes it`,
+    ({ length, quantity }) => `${quantity} × ${size(length)} mm by mass, no bar takes it`,
   )
   const together = job.members.length > 1 ? `; shared by cut length over ${job.members.length} lines` : ''
   return [...bars, ...loose].join('; ') + together
@@ -162,5 +162,5 @@ function basisOf(job: SteelJob, result: NestResult): string {
 function cutsText(cuts: readonly number[]): string {
   const counts = new Map<number, number>()
   for (const cut of cuts) counts.set(cut, (counts.get(cut) ?? 0) + 1)
-  return [...counts].map(([cut, count]) => `${count} × ${cut}`).join(' + ')
+  return [...counts].map(([cut, count]) => `${count} × ${size(cut)}`).join(' + ')
 }

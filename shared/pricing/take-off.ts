@@ -1,5 +1,5 @@
 import type { Section } from '../sections/section.ts'
-import { exact, sum, ZERO, type Exact } from './exact.ts'
+import { exact, sum, type Exact } from './exact.ts'
 import type { LineSpec, PlateSpec } from './line-spec.ts'
 
 /** What of a shape makes its price: names, kg/m, mm², mm. */
@@ -83,11 +83,11 @@ export function takeOff(section: PricedSection, spec: LineSpec): TakeOff {
   }
 }
 
-/** Mass of everything in a line, kg. */
-export function lineMass(piece: TakeOff, quantity: number): Exact {
-  return quantity === 0 ? ZERO : piece.pieceMass.times(quantity)
-}
-
 function metres(millimetres: number): Exact {
   return exact(millimetres).div(1000)
+}
+
+/** A length for reading: to a tenth of a millimetre. */
+export function size(millimetres: number): string {
+  return String(Math.round(millimetres * 10) / 10)
 }

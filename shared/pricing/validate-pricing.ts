@@ -3,7 +3,7 @@ import { exact, type Exact } from './exact.ts'
 import type { Override } from './line-spec.ts'
 import { barPriceOf, rodPriceOf, type PriceBook } from './price-book.ts'
 import type { LineToPrice } from './priced-quote.ts'
-import { takeOff } from './take-off.ts'
+import { size, takeOff } from './take-off.ts'
 
 export interface Terms {
   delivery: { km: number } | null
@@ -47,7 +47,7 @@ function checkLine(
   }
   if (spec.rods && !rodPriceOf(book, spec.rods.diameter)) {
     const largest = book.rods.prices.at(-1)?.diameter ?? 0
-    say('rods.diameter', `at most ${largest} mm, the largest rod of the price book`)
+    say('rods.diameter', `at most ${size(largest)} mm, the largest rod of the price book`)
   }
   spec.extras.forEach(({ unitCost, quantity }, index) => {
     if (!within(unitCost, 0, 1e9)) say(`extras.${index}.unitCost`, 'an amount of at least 0, such as 12.50')

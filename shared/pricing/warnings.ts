@@ -2,6 +2,7 @@ import { exact, type Exact } from './exact.ts'
 import { barPriceOf, rodPriceOf, type PriceBook } from './price-book.ts'
 import type { PricedLine, SteelPlan } from './priced-quote.ts'
 import type { LineWithTakeOff } from './steel-cost.ts'
+import { size } from './take-off.ts'
 
 /** What an estimator must look at before the price is given: each in words. */
 export function priceWarnings(
@@ -23,7 +24,7 @@ export function priceWarnings(
   }
   for (const { section, nest } of plans) {
     for (const { length, quantity, reason } of nest.unplaced) {
-      warnings.push(`${section}: ${quantity} of ${length} mm are charged by mass only; ${reason}`)
+      warnings.push(`${section}: ${quantity} of ${size(length)} mm are charged by mass only; ${reason}`)
     }
   }
   return [...warnings, ...lines.flatMap((line) => bookWarnings(book, line))]
@@ -38,13 +39,15 @@ function bookWarnings(book: PriceBook, { spec, section }: LineWithTakeOff): stri
   }
   for (const plate of [spec.base, spec.cap]) {
     if (plate && !book.plate.thicknesses.some((t) => Math.abs(t - plate.thickness) < 0.05)) {
-      warnings.push(`${spec.mark}: plate of ${plate.thickness} mm is not a stocked thickness`)
+      warnings.push(`${spec.mark}: plate of ${size(plate.thickness)} mm is not a stocked thickness`)
     }
   }
   if (spec.rods) {
     const rod = rodPriceOf(book, spec.rods.diameter)
     if (rod && Math.abs(rod.diameter - spec.rods.diameter) > 0.1) {
-      warnings.push(`${spec.mark}: rods of ${spec.rods.diameter} mm are priced as ${rod.diameter} mm`)
+      warnings.push(
+        `${spec.mark}: rods of ${size(spec.rods.diameter)} mm are priced as ${size(rod.diameter)} mm`,
+      )
     }
     if (!book.rods.grades.includes(spec.rods.grade)) {
       warnings.push(

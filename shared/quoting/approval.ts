@@ -1,4 +1,5 @@
 import { compare, moneyToDecimal, type Money } from '../pricing/money.ts'
+import { size } from '../pricing/take-off.ts'
 
 export interface Approval {
   total: Money
@@ -34,7 +35,9 @@ export function approvalBlockers({ lines, steel }: RevisionWork): string[] {
     return faults
   })
   const spliced = steel.flatMap(({ section, nest }) =>
-    nest.unplaced.map(({ length }) => `${section}: ${length} mm is longer than every bar and needs a splice`),
+    nest.unplaced.map(
+      ({ length }) => `${section}: ${size(length)} mm is longer than every bar and needs a splice`,
+    ),
   )
   return [...failing, ...spliced]
 }
