@@ -21,7 +21,10 @@ export function missingOf(line: LineDraft): Issue[] {
     issues.push({ path: 'quantity', message: 'how many of it, a whole number from 1' })
   }
   if (line.height === undefined) {
-    issues.push({ path: 'height', message: 'the height, from the floor to the top of the column' })
+    issues.push({
+      path: 'height',
+      message: 'the height, from under the base plate to the top of the cap plate',
+    })
   }
   if (!isLoaded(line)) issues.push({ path: 'loads.dead', message: 'at least one load' })
   return issues

@@ -9,7 +9,10 @@ import { fromDto, issuesOf, newRequest, toBody, type RequestDraft } from './requ
 import { focusField, useFieldErrors } from './useFieldErrors.ts'
 
 /** The request while it is written: its lines, what is wrong with them, and how it is kept. */
-export function useRequestForm(kept: RequestDto | null) {
+export function useRequestForm(
+  kept: RequestDto | null,
+  unread: ReadonlyMap<string, { path: string; message: string }>,
+) {
   const cache = useQueryClient()
   const draft = reactive<RequestDraft>(kept ? fromDto(kept) : newRequest())
   const current = ref(0)
@@ -60,6 +63,11 @@ export function useRequestForm(kept: RequestDto | null) {
 
   async function keep(): Promise<RequestDto | null> {
     problem.value = null
+    const [notRead] = unread.values()
+    if (notRead) {
+      focusField(notRead.path)
+      return null
+    }
     const found = issuesOf(draft)
     errors.set(found)
     if (found.length > 0) {
