@@ -37,7 +37,8 @@ function plain(factors: Record<string, number>, bare: Record<UnitSystem, string>
 
 const MANNERS: Record<QuantityKind, Manner> = {
   height: {
-    symbol: { SI: 'mm', US: 'ft-in' },
+    // Feet and inches carry their own marks.
+    symbol: { SI: 'mm', US: '' },
     read: (text, system) => parseLength(text, system, system === 'US' ? 'ft' : 'mm'),
     write: (value, system) => (system === 'US' ? heightLabel(value, system) : trimmed(value, 1)),
   },
