@@ -1,23 +1,6 @@
 import { z } from 'zod'
+import { ORDER_STATUSES, PAYMENT_STATUSES } from '../quoting/statuses.ts'
 import { id, instant, money, pageQuery } from './common.ts'
-
-export const ORDER_STATUSES = [
-  'awaiting deposit',
-  'released',
-  'in fabrication',
-  'ready',
-  'dispatched',
-  'completed',
-  'cancelled',
-] as const
-export const PAYMENT_STATUSES = [
-  'pending',
-  'succeeded',
-  'failed',
-  'refunded in part',
-  'refunded',
-  'disputed',
-] as const
 
 export const payment = z.object({
   id,

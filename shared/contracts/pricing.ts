@@ -55,6 +55,8 @@ export const lineSpec = z.strictObject({
 })
 export type LineSpecDto = z.infer<typeof lineSpec>
 
+const overridden = z.object({ computed: decimal, reason: z.string() })
+
 /** Shop eyes only. Costs are exact decimals; they never reach a contractor. */
 export const costLine = z.object({
   key: z.string(),
@@ -62,10 +64,12 @@ export const costLine = z.object({
   quantity: decimal,
   unit: z.string(),
   rate: decimal,
+  /** What the rate is for, such as `per kg`. */
+  rateUnit: z.string(),
   cost: decimal,
   /** Where the number comes from, in words. */
   basis: z.string(),
-  overridden: z.object({ computed: decimal, reason: z.string() }).nullable(),
+  overridden: overridden.nullable(),
 })
 
 export const pricedLine = z.object({
@@ -82,7 +86,9 @@ export const pricedLine = z.object({
       lineCost: decimal,
       contingency: decimal,
       margin: decimal,
+      marginOverridden: overridden.nullable(),
       computedUnitPrice: money,
+      unitPriceOverridden: overridden.nullable(),
       resultingMargin: decimal,
       belowFloor: z.boolean(),
     })

@@ -1,21 +1,11 @@
 import { z } from 'zod'
+import { REVISION_STATUSES } from '../quoting/statuses.ts'
 import { decimal, id, instant, money, pageQuery, text } from './common.ts'
 import { basePlateAnswer, columnCheck } from './checks.ts'
 import { lineSpec, pricedQuote } from './pricing.ts'
 import { alternative } from './proposals.ts'
 import { lineRequirement } from './requirement.ts'
 import { outline } from './sections.ts'
-
-export const REVISION_STATUSES = [
-  'draft',
-  'approved',
-  'sent',
-  'accepted',
-  'declined',
-  'expired',
-  'superseded',
-  'withdrawn',
-] as const
 
 export const quoteLine = z.object({
   mark: z.string(),

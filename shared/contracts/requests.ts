@@ -1,16 +1,7 @@
 import { z } from 'zod'
+import { REQUEST_STATUSES } from '../quoting/statuses.ts'
 import { byId, id, instant, money, pageQuery, text } from './common.ts'
 import { lineRequirement } from './requirement.ts'
-
-export const REQUEST_STATUSES = [
-  'draft',
-  'submitted',
-  'in review',
-  'quoted',
-  'closed',
-  'withdrawn',
-  'declined',
-] as const
 
 export const shipTo = z.strictObject({
   address: text(300),

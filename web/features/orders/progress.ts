@@ -1,4 +1,5 @@
-import { ORDER_STATUSES, type OrderDto } from '../../../shared/contracts/orders.ts'
+import type { OrderDto } from '../../../shared/contracts/orders.ts'
+import { ORDER_STATUSES } from '../../../shared/quoting/statuses.ts'
 
 export interface Station {
   status: OrderDto['status']
