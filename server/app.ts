@@ -1,0 +1,43 @@
+import compression from 'compression'
+import cookieParser from 'cookie-parser'
+import express, { type Express } from 'express'
+import { randomUUID } from 'node:crypto'
+import { pinoHttp } from 'pino-http'
+import type { Deps } from './deps.ts'
+import { ownSiteOnly } from './http/cross-site.ts'
+import { pages } from './http/pages.ts'
+import { noSuchOperation, problems } from './http/problem.ts'
+import { neverStored, securityHeaders } from './http/security-headers.ts'
+import { apiDescriptionRoutes } from './modules/api-description/api-description.routes.ts'
+import { auditRoutes } from './modules/audit/audit.routes.ts'
+import { healthRoutes } from './modules/health/health.routes.ts'
+import { peopleRoutes } from './modules/people/people.routes.ts'
+import { sessionRoutes } from './modules/sessions/sessions.routes.ts'
+
+const MODULES = [sessionRoutes, peopleRoutes, auditRoutes, healthRoutes, apiDescriptionRoutes]
+
+/** The whole application behind one door. `pagesFolder`: the built pages, or left out where there are none. */
+export function createApp(deps: Deps, pagesFolder?: string): Express {
+  const { config, logger } = deps
+  const app = express()
+  app.set('trust proxy', config.trustProxy)
+  app.disable('x-powered-by')
+  app.use(pinoHttp({ logger, genReqId: () => randomUUID(), useLevel: 'debug' }))
+  app.use((req, res, next) => {
+    res.set('X-Request-Id', String(req.id))
+    next()
+  })
+  app.use(securityHeaders(config.publicUrl.startsWith('https:')))
+  app.use(compression())
+  app.use('/api', neverStored)
+  // The processor signs the very bytes that it sends.
+  app.use('/api/stripe/events', express.raw({ type: 'application/json', limit: '1mb' }))
+  app.use(/^\/api\/(?!stripe\/events)/, ownSiteOnly(config.publicUrl))
+  app.use(cookieParser())
+  app.use(express.json({ limit: '2mb', strict: false }))
+  for (const routes of MODULES) app.use(routes(deps))
+  app.use('/api', noSuchOperation)
+  if (pagesFolder) app.use(pages(pagesFolder))
+  app.use(problems(logger))
+  return app
+}
