@@ -1,7 +1,11 @@
 import type { IdempotencyTable } from '../http/idempotency.table.ts'
 import type { AuditTable } from '../modules/audit/audit.table.ts'
 import type { CompaniesTable } from '../modules/companies/companies.table.ts'
+import type { OrderProgressTable, OrdersTable } from '../modules/orders/orders.table.ts'
 import type { PeopleTable } from '../modules/people/people.table.ts'
+import type { PriceBooksTable, TaxRegionsTable } from '../modules/price-books/price-books.table.ts'
+import type { QuotesTable, RevisionsTable } from '../modules/quotes/quotes.table.ts'
+import type { RequestsTable } from '../modules/requests/requests.table.ts'
 import type { SessionsTable, SignInAttemptsTable } from '../modules/sessions/sessions.table.ts'
 import type { CountersTable } from './counters.table.ts'
 
@@ -14,4 +18,11 @@ export interface Database {
   people: PeopleTable
   sessions: SessionsTable
   signInAttempts: SignInAttemptsTable
+  priceBooks: PriceBooksTable
+  taxRegions: TaxRegionsTable
+  requests: RequestsTable
+  quotes: QuotesTable
+  revisions: RevisionsTable
+  orders: OrdersTable
+  orderProgress: OrderProgressTable
 }
