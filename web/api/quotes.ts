@@ -1,7 +1,9 @@
-import type { BodyInputOf, ParamsOf } from '../../shared/contracts/operations.ts'
+import type { BodyInputOf, ParamsOf, QueryInputOf } from '../../shared/contracts/operations.ts'
 import { call, callFile } from './client.ts'
 
 export type QuoteAt = ParamsOf<'acceptRevision'>
+
+export type RevisionInput = BodyInputOf<'editRevision'>
 
 export const quoteKeys = {
   all: ['quotes'] as const,
@@ -9,6 +11,9 @@ export const quoteKeys = {
   linked: ['linked-quote'] as const,
 }
 
+export function listQuotes(query: QueryInputOf<'listQuotes'>, signal?: AbortSignal) {
+  return call('listQuotes', { query, ...(signal ? { signal } : {}) })
+}
 export function readQuote(id: string) {
   return call('readQuote', { params: { id } })
 }
@@ -23,4 +28,23 @@ export function declineRevision(params: QuoteAt, body: BodyInputOf<'declineRevis
 }
 export function readQuoteDocument(params: QuoteAt) {
   return callFile('readQuoteDocument', { params })
+}
+
+export function tryRevision(params: QuoteAt, body: RevisionInput, signal: AbortSignal) {
+  return call('tryRevision', { params, body, signal })
+}
+export function editRevision(params: QuoteAt, body: RevisionInput, version: number) {
+  return call('editRevision', { params, body, ifMatch: version })
+}
+export function approveRevision(params: QuoteAt, version: number) {
+  return call('approveRevision', { params, ifMatch: version })
+}
+export function sendRevision(params: QuoteAt, version: number, idempotencyKey: string) {
+  return call('sendRevision', { params, ifMatch: version, idempotencyKey })
+}
+export function withdrawRevision(params: QuoteAt) {
+  return call('withdrawRevision', { params })
+}
+export function reviseQuote(id: string, idempotencyKey: string) {
+  return call('reviseQuote', { params: { id }, idempotencyKey })
 }

@@ -26,3 +26,10 @@ export function submitRequest(id: string, version: number) {
 export function withdrawRequest(id: string) {
   return call('withdrawRequest', { params: { id } })
 }
+export function declineRequest(id: string, reason: string) {
+  return call('declineRequest', { params: { id }, body: { reason } })
+}
+/** Takes a request into review; the same key for the same request, however often it is pressed. */
+export function openQuote(id: string, idempotencyKey: string) {
+  return call('openQuote', { params: { id }, idempotencyKey })
+}

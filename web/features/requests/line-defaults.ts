@@ -1,4 +1,4 @@
-import { FINISH_WORDS } from './choices.ts'
+import { FINISH_WORDS } from '../../format/choices.ts'
 import type { LineDraft } from './line-draft.ts'
 
 function endsWords({ ends }: LineDraft): string {

@@ -1,5 +1,5 @@
-import type { Finish } from '../../../shared/pricing/line-spec.ts'
-import type { Family } from '../../../shared/sections/section.ts'
+import type { Finish } from '../../shared/pricing/line-spec.ts'
+import type { Family } from '../../shared/sections/section.ts'
 
 export interface Choice<Value> {
   value: Value

@@ -1,0 +1,14 @@
+import type { QueryInputOf } from '../../shared/contracts/operations.ts'
+import { call } from './client.ts'
+
+export const sectionKeys = {
+  list: (query: QueryInputOf<'listSections'>) => ['sections', query] as const,
+  one: (designation: string) => ['sections', designation] as const,
+}
+
+export function listSections(query: QueryInputOf<'listSections'>, signal?: AbortSignal) {
+  return call('listSections', { query, ...(signal ? { signal } : {}) })
+}
+export function readSection(designation: string, signal?: AbortSignal) {
+  return call('readSection', { params: { designation }, ...(signal ? { signal } : {}) })
+}
