@@ -13,10 +13,6 @@ const STATEMENTS = [
   ) STRICT`,
   `CREATE TRIGGER price_books_are_never_changed BEFORE UPDATE ON price_books
     BEGIN SELECT RAISE(ABORT, 'a price book is never changed: a new one has the next version'); END`,
-  `CREATE TABLE tax_regions (
-    region TEXT PRIMARY KEY,
-    rate TEXT NOT NULL
-  ) STRICT`,
   `CREATE TABLE requests (
     id TEXT PRIMARY KEY,
     number TEXT NOT NULL UNIQUE,

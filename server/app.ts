@@ -3,6 +3,7 @@ import cookieParser from 'cookie-parser'
 import express, { type Express } from 'express'
 import { randomUUID } from 'node:crypto'
 import { pinoHttp } from 'pino-http'
+import { operations } from '../shared/contracts/operations.ts'
 import type { Deps } from './deps.ts'
 import { ownSiteOnly } from './http/cross-site.ts'
 import { pages } from './http/pages.ts'
@@ -12,9 +13,19 @@ import { apiDescriptionRoutes } from './modules/api-description/api-description.
 import { auditRoutes } from './modules/audit/audit.routes.ts'
 import { healthRoutes } from './modules/health/health.routes.ts'
 import { peopleRoutes } from './modules/people/people.routes.ts'
+import { priceBookRoutes } from './modules/price-books/price-books.routes.ts'
 import { sessionRoutes } from './modules/sessions/sessions.routes.ts'
 
-const MODULES = [sessionRoutes, peopleRoutes, auditRoutes, healthRoutes, apiDescriptionRoutes]
+const MODULES = [
+  sessionRoutes,
+  peopleRoutes,
+  priceBookRoutes,
+  auditRoutes,
+  healthRoutes,
+  apiDescriptionRoutes,
+]
+
+const EVENTS = operations.receiveStripeEvent.path
 
 /** The whole application behind one door. `pagesFolder`: the built pages, or left out where there are none. */
 export function createApp(deps: Deps, pagesFolder?: string): Express {
@@ -31,8 +42,8 @@ export function createApp(deps: Deps, pagesFolder?: string): Express {
   app.use(compression())
   app.use('/api', neverStored)
   // The processor signs the very bytes that it sends.
-  app.use('/api/stripe/events', express.raw({ type: 'application/json', limit: '1mb' }))
-  app.use(/^\/api\/(?!stripe\/events)/, ownSiteOnly(config.publicUrl))
+  app.use(EVENTS, express.raw({ type: 'application/json', limit: '1mb' }))
+  app.use(ownSiteOnly(config.publicUrl, [EVENTS]))
   app.use(cookieParser())
   app.use(express.json({ limit: '2mb', strict: false }))
   for (const routes of MODULES) app.use(routes(deps))

@@ -16,6 +16,8 @@ const environment = z.object({
   MAIL_FROM: z.string().min(3).optional(),
   LINK_KEY: z.string().min(32, 'at least 32 characters').optional(),
   TRUST_PROXY: z.coerce.number().int().min(0).max(10).default(0),
+  FIRST_ADMIN_EMAIL: z.email().toLowerCase().optional(),
+  FIRST_ADMIN_PASSWORD: z.string().min(12, 'at least 12 characters').optional(),
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'silent']).default('info'),
 })
 
@@ -36,6 +38,8 @@ export interface Config {
   linkKey: string
   trustProxy: number
   logLevel: string
+  /** Made at the first start where there are no demo people. */
+  firstAdmin: { email: string; password: string } | undefined
 }
 
 /** What is needed where there is real money and real mail. */
@@ -50,8 +54,13 @@ function keptSecret(dataDir: string, name: string): string {
   return readFileSync(file, 'utf8').trim()
 }
 
+function firstAdminIn(vars: z.infer<typeof environment>): Config['firstAdmin'] {
+  const { FIRST_ADMIN_EMAIL: email, FIRST_ADMIN_PASSWORD: password } = vars
+  return email && password ? { email, password } : undefined
+}
+
 /** Reads the environment once. Throws `ConfigFault` naming each variable that is wrong or missing. */
-export function readConfig(env: Record<string, string | undefined>): Config {
+export function readConfig(env: Record<string, string | undefined> = process.env): Config {
   const given = Object.fromEntries(Object.entries(env).filter(([, value]) => value !== ''))
   const parsed = environment.safeParse(given)
   if (!parsed.success) {
@@ -88,5 +97,6 @@ export function readConfig(env: Record<string, string | undefined>): Config {
     linkKey: vars.LINK_KEY ?? keptSecret(dataDir, 'link.key'),
     trustProxy: vars.TRUST_PROXY,
     logLevel: vars.LOG_LEVEL,
+    firstAdmin: firstAdminIn(vars),
   }
 }

@@ -7,7 +7,7 @@ import type { Db } from './db/open-database.ts'
 import type { Links } from './http/links.ts'
 import type { Passwords } from './passwords/passwords.ts'
 import type { DocumentPress } from './pdf/document-press.ts'
-import type { ShopDetails } from './pdf/quote-document.ts'
+import type { Shop } from './shop.ts'
 import type { Storage } from './storage/storage.ts'
 
 /** Everything that the modules are given: no module reaches for the outside by itself. */
@@ -23,5 +23,5 @@ export interface Deps {
   mailer: Transporter
   stripe: Stripe
   catalogue: Catalogue
-  shop: ShopDetails
+  shop: Shop
 }

@@ -4,15 +4,6 @@
  */
 export const DEMO_PASSWORD = 'plumb-line-42'
 
-export const DEMO_SHOP = {
-  name: 'Larkfield Steelworks',
-  address: ['14 Foundry Lane', 'Larkfield, Eastmark 20417'],
-  phone: '+1 555 0142',
-  email: 'quotes@larkfield.example',
-  paper: 'Letter',
-  system: 'US',
-} as const
-
 export const DEMO_COMPANIES = [
   { key: 'tessell', name: 'Tessell & Daughters Building', taxCertificate: null },
   { key: 'quillon', name: 'Quillon Bay Contractors', taxCertificate: 'EM-7731-X' },

@@ -3,7 +3,7 @@ import type { AuditTable } from '../modules/audit/audit.table.ts'
 import type { CompaniesTable } from '../modules/companies/companies.table.ts'
 import type { OrderProgressTable, OrdersTable } from '../modules/orders/orders.table.ts'
 import type { PeopleTable } from '../modules/people/people.table.ts'
-import type { PriceBooksTable, TaxRegionsTable } from '../modules/price-books/price-books.table.ts'
+import type { PriceBooksTable } from '../modules/price-books/price-books.table.ts'
 import type { QuotesTable, RevisionsTable } from '../modules/quotes/quotes.table.ts'
 import type { RequestsTable } from '../modules/requests/requests.table.ts'
 import type { SessionsTable, SignInAttemptsTable } from '../modules/sessions/sessions.table.ts'
@@ -19,7 +19,6 @@ export interface Database {
   sessions: SessionsTable
   signInAttempts: SignInAttemptsTable
   priceBooks: PriceBooksTable
-  taxRegions: TaxRegionsTable
   requests: RequestsTable
   quotes: QuotesTable
   revisions: RevisionsTable

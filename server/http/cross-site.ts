@@ -3,13 +3,12 @@ import { fail } from '../errors.ts'
 
 /**
  * A write must come from our own pages. Browsers say so themselves; an older one names its origin. A program that
- * sends no cookie has nothing that another site could borrow. The signed events of the card processor come without
- * either and prove themselves.
+ * sends no cookie has nothing that another site could borrow. `except`: paths whose messages prove themselves.
  */
-export function ownSiteOnly(publicUrl: string): RequestHandler {
+export function ownSiteOnly(publicUrl: string, except: readonly string[]): RequestHandler {
   const origin = new URL(publicUrl).origin
   return (req, _res, next) => {
-    if (req.method === 'GET' || req.method === 'HEAD') return next()
+    if (req.method === 'GET' || req.method === 'HEAD' || except.includes(req.path)) return next()
     const site = req.get('sec-fetch-site')
     const from = req.get('origin')
     const hasCookie = req.get('cookie') !== undefined

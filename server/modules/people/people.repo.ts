@@ -53,3 +53,7 @@ export async function insertPerson(trx: Trx, row: Insertable<PeopleTable>): Prom
 export async function noteSignIn(trx: Trx, id: string, at: string): Promise<void> {
   await trx.updateTable('people').set({ lastSignInAt: at }).where('id', '=', id).execute()
 }
+
+export async function anyPerson(db: Reader): Promise<boolean> {
+  return (await db.selectFrom('people').select('id').limit(1).executeTakeFirst()) !== undefined
+}

@@ -5,6 +5,7 @@ import type { Db, Reader, Trx } from '../../db/open-database.ts'
 import { notFound } from '../../errors.ts'
 import { toPerson } from './people.map.ts'
 import {
+  anyPerson,
   findPerson,
   findPersonByEmail,
   insertPerson,
@@ -41,4 +42,8 @@ export function signedIn(trx: Trx, id: string, at: string): Promise<void> {
 
 export function addPerson(trx: Trx, row: Parameters<typeof insertPerson>[1]): Promise<void> {
   return insertPerson(trx, row)
+}
+
+export function hasPeople(db: Reader): Promise<boolean> {
+  return anyPerson(db)
 }

@@ -6,9 +6,3 @@ export interface PriceBooksTable {
   book: string
   createdAt: string
 }
-
-export interface TaxRegionsTable {
-  region: string
-  /** Fraction as exact decimal. */
-  rate: string
-}

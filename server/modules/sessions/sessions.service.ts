@@ -91,8 +91,8 @@ async function holdBack({ db, clock }: Deps, watched: readonly Watched[]): Promi
   )
   const now = clock().getTime()
   const waits = rows.map(({ key, failures, lastAt }) => {
-    const free = watched.find((one) => one.key === key)?.free ?? 0
-    return Date.parse(lastAt) + waitAfter(failures, free) - now
+    const wait = waitAfter(failures, watched.find((one) => one.key === key)?.free ?? 0)
+    return wait && Date.parse(lastAt) + wait - now
   })
   const wait = Math.max(0, ...waits)
   if (wait === 0) return
