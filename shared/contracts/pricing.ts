@@ -9,6 +9,16 @@ export const plateSpec = z.strictObject({
   thickness: z.number().positive().max(200),
   holes: z.strictObject({ count: z.int().min(0).max(40), diameter: z.number().min(0).max(150) }),
 })
+const extra = z.strictObject({
+  description: z.string().trim().min(1).max(120),
+  quantity: z.number().positive().max(100000),
+  unitCost: decimal,
+})
+const override = z.strictObject({
+  item: z.enum(OVERRIDABLE),
+  value: decimal,
+  reason: z.string().trim().min(3).max(300),
+})
 export const lineSpec = z.strictObject({
   mark: z.string().trim().min(1).max(20),
   quantity: z.int().min(1).max(2000),
@@ -34,26 +44,17 @@ export const lineSpec = z.strictObject({
       }),
     )
     .max(20),
-  extras: z
-    .array(
-      z.strictObject({
-        description: z.string().trim().min(1).max(120),
-        quantity: z.number().positive().max(100000),
-        unitCost: decimal,
-      }),
-    )
-    .max(20),
-  overrides: z
-    .array(
-      z.strictObject({
-        item: z.enum(OVERRIDABLE),
-        value: decimal,
-        reason: z.string().trim().min(3).max(300),
-      }),
-    )
-    .max(20),
+  extras: z.array(extra).max(20),
+  overrides: z.array(override).max(20),
 })
 export type LineSpecDto = z.infer<typeof lineSpec>
+
+/** As answered: what extras cost, and what was set by hand, is for shop eyes only. */
+export const shownLineSpec = lineSpec.extend({
+  extras: z.array(extra.partial({ unitCost: true })),
+  overrides: z.array(override).optional(),
+})
+export type ShownLineSpecDto = z.infer<typeof shownLineSpec>
 
 const overridden = z.object({ computed: decimal, reason: z.string() })
 

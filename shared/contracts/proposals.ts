@@ -1,7 +1,7 @@
 import { z } from 'zod'
 import { money } from './common.ts'
 import { columnCheck, basePlateAnswer } from './checks.ts'
-import { lineSpec, pricedQuote } from './pricing.ts'
+import { pricedQuote, shownLineSpec } from './pricing.ts'
 import { lineRequirement } from './requirement.ts'
 import { outline } from './sections.ts'
 
@@ -27,7 +27,7 @@ export const proposal = z.object({
   check: columnCheck,
   base: basePlateAnswer.nullable(),
   /** How it would be made: the start of the estimator's work. */
-  spec: lineSpec,
+  spec: shownLineSpec,
   alternatives: z.array(alternative),
   /** Why the next lighter shape does not do. */
   nextLighter: z.object({ section: z.string(), reason: z.string() }).nullable(),

@@ -2,7 +2,7 @@ import { z } from 'zod'
 import { REVISION_STATUSES } from '../quoting/statuses.ts'
 import { decimal, id, instant, money, pageQuery, text } from './common.ts'
 import { basePlateAnswer, columnCheck } from './checks.ts'
-import { lineSpec, pricedQuote } from './pricing.ts'
+import { lineSpec, pricedQuote, shownLineSpec } from './pricing.ts'
 import { alternative } from './proposals.ts'
 import { lineRequirement } from './requirement.ts'
 import { outline } from './sections.ts'
@@ -10,7 +10,7 @@ import { outline } from './sections.ts'
 export const quoteLine = z.object({
   mark: z.string(),
   requirement: lineRequirement,
-  spec: lineSpec,
+  spec: shownLineSpec,
   check: columnCheck,
   base: basePlateAnswer.nullable(),
   designationSI: z.string(),
