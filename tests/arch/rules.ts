@@ -7,9 +7,10 @@ export const SHARED_LAYERS = [
   ['stability'],
   ['standards'],
   ['base'],
-  ['proposal'],
   ['pricing'],
   ['quoting'],
+  // Shapes are ranked by their real price, so a proposal stands on pricing.
+  ['proposal'],
   ['drawing'],
   ['contracts'],
 ] as const
