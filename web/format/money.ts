@@ -26,3 +26,8 @@ export function moneyFigures({ amount, currency }: MoneyDto): string {
 export function moneyText(money: MoneyDto): string {
   return `${money.currency}\u00a0${moneyFigures(money)}`
 }
+
+/** In whole units of the currency, for drawing to scale; never for reckoning. */
+export function moneyNumber({ amount, currency }: MoneyDto): number {
+  return amount / 10 ** (formatFor(currency).resolvedOptions().maximumFractionDigits ?? 2)
+}
