@@ -51,6 +51,10 @@ const FAMILY_WORDS: Record<Family, string> = {
   RHS: 'RHS',
   CHS: 'CHS',
 }
+export const FAMILY_CHOICES = (Object.keys(FAMILY_WORDS) as Family[]).map((value) => ({
+  value,
+  text: FAMILY_WORDS[value],
+}))
 const AMERICAN: Family[] = ['W', 'HSS_SQUARE', 'HSS_RECT', 'HSS_ROUND', 'PIPE']
 
 /** Families to choose from: a standard's own ones. */
