@@ -46,6 +46,8 @@ interface SectionBase {
 
 export interface ISection extends SectionBase {
   shape: 'I'
+  /** Welded from plates; left out for rolled shapes. */
+  builtUp?: boolean
   tw: number
   tf: number
   /** Root fillet radius, mm. */

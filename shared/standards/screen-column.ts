@@ -1,0 +1,62 @@
+import { E_AISC, G_AISC, type Steel } from '../materials/steel.ts'
+import type { Section } from '../sections/section.ts'
+import {
+  bucklingModes,
+  governingMode,
+  nominalCompression,
+  type CompressionInput,
+} from './aisc360/compression.ts'
+import { available, FACTORS } from './aisc360/resistance.ts'
+import { slenderness } from './aisc360/slenderness.ts'
+import { availableTension } from './aisc360/tension.ts'
+import { demandOf, type PreparedColumn } from './prepare-column.ts'
+
+/** What a shape can carry as this column, on numbers alone. N. */
+export interface Screening {
+  /** Available compressive strength. */
+  capacity: number
+  tension: number
+  compression: number
+  uplift: number
+  utilisation: number
+  /** The larger Lc/r. */
+  slenderness: number
+}
+
+export function compressionInput(prepared: PreparedColumn, Fy: number): CompressionInput {
+  const { solution, braceOffsets } = prepared
+  return {
+    E: E_AISC,
+    G: G_AISC,
+    Fy,
+    strong: solution.strong.used,
+    weak: solution.weak.used,
+    torsion: solution.torsion.used,
+    braceOffsets,
+  }
+}
+
+/**
+ * The clauses of `checkColumn` without their steps. Refuses a round shape beyond the range of E7.2.
+ */
+export function screenColumn(
+  prepared: PreparedColumn,
+  section: Section,
+  steel: Pick<Steel, 'Fy' | 'Fu'>,
+): Screening {
+  const { method } = prepared.terms
+  const input = compressionInput(prepared, steel.Fy)
+  const mode = governingMode(bucklingModes(section, input))
+  const nominal = nominalCompression(section, mode, E_AISC, steel.Fy)
+  const capacity = available(nominal, FACTORS.compression, method)
+  const tension = availableTension(steel.Fy, steel.Fu, section.area, method)
+  const { compression, uplift } = demandOf(prepared, section.mass)
+  return {
+    capacity,
+    tension,
+    compression,
+    uplift,
+    utilisation: Math.max(compression / capacity, uplift / tension),
+    slenderness: Math.max(slenderness(input.strong, section.rx), slenderness(input.weak, section.ry)),
+  }
+}
