@@ -1,3 +1,4 @@
+import { leastLeg } from '../base/fillet.ts'
 import type { Finish, LineSpec, PlateSpec, WeldSpec } from '../pricing/line-spec.ts'
 import type { Section } from '../sections/section.ts'
 import { MM_PER_INCH } from '../units/convert.ts'
@@ -77,14 +78,7 @@ export function capPlateFor({ depth, width, shape }: Section): PlateSpec {
   }
 }
 
-/**
- * Least fillet leg by the thinner part joined, mm (AISC 360-22 Table J2.4, metric: 3 to 6 mm, 5 to 13, 6 to 19,
- * 8 above), all round the outline by shop practice.
- */
+/** Least fillet leg by the thinner part joined, all round the outline by shop practice. mm. */
 export function capWeldLeg(section: Section, cap: PlateSpec): number {
-  const wall = section.shape === 'I' ? section.tf : section.wall
-  const thinner = Math.min(wall, cap.thickness)
-  if (thinner <= 6) return 3
-  if (thinner <= 13) return 5
-  return thinner <= 19 ? 6 : 8
+  return leastLeg(Math.min(section.shape === 'I' ? section.tf : section.wall, cap.thickness))
 }

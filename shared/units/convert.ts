@@ -6,6 +6,8 @@ export const MM_PER_INCH = 25.4
 export const N_PER_KIP = 4448.2216152605
 export const MPA_PER_KSI = N_PER_KIP / MM_PER_INCH ** 2
 export const KG_PER_LB = 0.45359237
+/** Pound-force. */
+export const N_PER_LB = N_PER_KIP / 1000
 export const KG_M_PER_LB_FT = KG_PER_LB / 0.3048
 
 declare const unit: unique symbol
