@@ -1,0 +1,116 @@
+import { describe, expect, it } from 'vitest'
+import { catalogue } from '../../seeds/reference/catalogue.ts'
+import { available, FACTORS } from '../../shared/standards/aisc360/resistance.ts'
+import { eulerStress, nominalStress } from '../../shared/standards/aisc360/flexural-buckling.ts'
+import { c2Of } from '../../shared/standards/aisc360/effective-width.ts'
+import {
+  bucklingModes,
+  governingMode,
+  nominalCompression,
+} from '../../shared/standards/aisc360/compression.ts'
+import { E_AISC, G_AISC } from '../../shared/materials/steel.ts'
+
+const KIP = 4448.2216152605
+const KSI = KIP / 25.4 ** 2
+const FOOT = 304.8
+
+/** Critical stress at a slenderness, ksi. */
+function critical(Fy: number, slenderness: number): number {
+  return nominalStress(Fy * KSI, eulerStress(E_AISC, slenderness)) / KSI
+}
+
+describe('AISC Manual, 14th edition, Table 4-22 (15th: 4-14): available critical stress', () => {
+  it.each([
+    [50, 10, 29.7],
+    [50, 20, 29.1],
+    [50, 24, 28.7],
+    [46, 20, 26.8],
+    [46, 24, 26.5],
+    [42, 24, 24.3],
+    [36, 20, 21.1],
+    [36, 24, 20.9],
+    [35, 24, 20.3],
+  ])('Fy = %s ksi, Lc/r = %s: Fcr/Ω = %s ksi', (Fy, slenderness, printed) => {
+    expect(
+      Math.abs(available(critical(Fy, slenderness), FACTORS.compression, 'ASD') - printed),
+    ).toBeLessThanOrEqual(0.1)
+  })
+  it('Fy = 50 ksi, Lc/r = 200: φFcr = 5.65 ksi (from memory)', () => {
+    expect(Math.abs(available(critical(50, 200), FACTORS.compression, 'LRFD') - 5.65)).toBeLessThanOrEqual(
+      0.01,
+    )
+  })
+})
+
+describe('AISC LRFD Manual, 2nd edition, Table 3-36: the same curve with φ = 0.85, Fy = 36 ksi', () => {
+  it.each([
+    [1, 30.6],
+    [100, 18.08],
+    [140, 10.89],
+    [199, 5.39],
+  ])('Lc/r = %s: 0.85·Fcr = %s ksi', (slenderness, printed) => {
+    expect(Math.abs(0.85 * critical(36, slenderness) - printed)).toBeLessThanOrEqual(0.0101)
+  })
+})
+
+/** φPn of a W of 50 ksi steel with one effective length about every axis, kip. */
+function strength(designation: string, feet: number, method: 'LRFD' | 'ASD'): number {
+  const section = catalogue.find(designation)
+  if (!section) throw new Error(`no ${designation}`)
+  // A table starts at no length at all: as short as makes no difference.
+  const length = Math.max(feet, 0.01) * FOOT
+  const input = { E: E_AISC, G: G_AISC, Fy: 50 * KSI, strong: length, weak: length, torsion: length }
+  const mode = governingMode(bucklingModes(section, input))
+  return available(nominalCompression(section, mode, E_AISC, 50 * KSI), FACTORS.compression, method) / KIP
+}
+
+describe('AISC Manual, Table 4-1: W14X730, Fy = 50 ksi', () => {
+  it.each([
+    [0, 9670],
+    [11, 9130],
+    [20, 7990],
+    [30, 6290],
+    [40, 4500],
+  ])('at %s ft: φPn = %s kip', (feet, printed) => {
+    expect(Math.abs(strength('W14X730', feet, 'LRFD') - printed)).toBeLessThanOrEqual(10)
+  })
+})
+
+describe('column load table in the Manual’s format, Fy = 50 ksi', () => {
+  it.each([
+    ['W14X873', 0, 11600, 100],
+    ['W14X873', 20, 9700, 10],
+    ['W14X873', 30, 7790, 10],
+    ['W14X873', 40, 5730, 10],
+    ['W14X873', 50, 3870, 10],
+    ['W14X808', 20, 8940, 10],
+    ['W14X808', 40, 5200, 10],
+  ])('%s at %s ft: φPn = %s kip', (designation, feet, printed, tolerance) => {
+    expect(Math.abs(strength(designation, feet, 'LRFD') - printed)).toBeLessThanOrEqual(tolerance)
+  })
+  it.each([
+    ['LRFD', 20, 2360, 10],
+    ['ASD', 40, 515, 1],
+  ] as const)(
+    'W21X275 with the 81 in² and 3.12 in of that table, %s at %s ft: %s kip',
+    (method, feet, printed, tolerance) => {
+      const stress = available(critical(50, (feet * 12) / 3.12), FACTORS.compression, method)
+      expect(Math.abs(stress * 81 - printed)).toBeLessThanOrEqual(tolerance)
+    },
+  )
+})
+
+describe('Table 4-1 as textbooks quote it', () => {
+  it('W14X74 at 20 ft: φPn = 494 kip', () => {
+    expect(Math.abs(strength('W14X74', 20, 'LRFD') - 494)).toBeLessThanOrEqual(1)
+  })
+})
+
+describe('ANSI/AISC 360-22, Table E7.1', () => {
+  it.each([
+    [0.18, 1.31],
+    [0.22, 1.49],
+  ])('c1 = %s has c2 = %s', (c1, printed) => {
+    expect(Math.abs(c2Of(c1) - printed)).toBeLessThanOrEqual(0.011)
+  })
+})
