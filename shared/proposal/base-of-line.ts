@@ -1,0 +1,38 @@
+import type { BaseDesign, BaseInput } from '../base/base-design.ts'
+import { designBase } from '../base/design-base.ts'
+import type { PriceBook } from '../pricing/price-book.ts'
+import type { Section } from '../sections/section.ts'
+import { selfWeight } from '../standards/asce7/self-weight.ts'
+import type { Method } from '../standards/aisc360/resistance.ts'
+import type { LineAsked } from './line-asked.ts'
+
+/** What the foot of a column passes on, N. */
+export interface FootLoads {
+  compression: number
+  uplift: number
+}
+
+type Given = Pick<BaseInput, 'plate' | 'rods'>
+
+/** The base of a line: what is given is checked, the rest found from what the shop stocks. */
+export function baseOfLine(
+  asked: Pick<LineAsked, 'base' | 'method' | 'height'>,
+  book: PriceBook,
+  section: Section,
+  { compression, uplift }: FootLoads,
+  given: Given = {},
+): BaseDesign {
+  const method: Method = asked.method ?? 'LRFD'
+  return designBase({
+    method,
+    section,
+    required: { compression, uplift },
+    concrete: asked.base.concrete,
+    stock: {
+      thicknesses: book.plate.thicknesses,
+      rodDiameters: book.rods.prices.map(({ diameter }) => diameter),
+    },
+    weight: selfWeight(section.mass, asked.height ?? 0),
+    ...given,
+  })
+}

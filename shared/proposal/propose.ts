@@ -1,0 +1,164 @@
+import type { BaseDesign } from '../base/base-design.ts'
+import { priceQuote } from '../pricing/build-up.ts'
+import type { LineSpec } from '../pricing/line-spec.ts'
+import type { Money } from '../pricing/money.ts'
+import type { PriceBook } from '../pricing/price-book.ts'
+import type { PricedQuote } from '../pricing/priced-quote.ts'
+import type { Catalogue } from '../sections/catalogue.ts'
+import { outlineOf, type Rings } from '../sections/outline.ts'
+import type { Section } from '../sections/section.ts'
+import { checkColumn, type ColumnCheck } from '../standards/check-column.ts'
+import { prepareColumn, type PreparedColumn } from '../standards/prepare-column.ts'
+import { Refusal, refuse, type Issue } from '../units/refusal.ts'
+import { baseOfLine } from './base-of-line.ts'
+import { familiesFor, limitsBroken, screenCatalogue, steelsOf, type Candidate } from './candidates.ts'
+import type { LineAsked } from './line-asked.ts'
+import { nextLighter, type NextLighter } from './next-lighter.ts'
+import { nothingFits, type NoProposal } from './nothing-fits.ts'
+import { cheapest, priceOne, specOf, type PricedCandidate, type PriceTerms } from './price-candidates.ts'
+
+export interface Alternative {
+  section: string
+  designationSI: string
+  family: string
+  because: ('cheapest' | 'lightest' | 'slimmest')[]
+  utilisation: number
+  mass: number
+  depth: number
+  width: number
+  unitPrice: Money
+}
+
+export interface Proposal {
+  found: true
+  section: string
+  designationSI: string
+  outline: Rings
+  depth: number
+  width: number
+  check: ColumnCheck
+  base: BaseDesign | null
+  spec: LineSpec
+  alternatives: Alternative[]
+  nextLighter: NextLighter | null
+  price: PricedQuote
+}
+
+export interface ProposalInput {
+  asked: LineAsked
+  catalogue: Catalogue
+  book: PriceBook
+  /** null: collected. */
+  delivery: { km: number } | null
+  /** Another shape than the cheapest: the one to propose, whether it holds or not. */
+  section?: string | undefined
+}
+
+/** Of the cheapest, this many are shown beside the lightest and the slimmest. */
+const SHOWN = 6
+
+/** What keeps a line from being made, beyond what the checks themselves refuse. */
+function lineIssues({ height, quantity }: LineAsked): Issue[] {
+  const issues: Issue[] = []
+  if (height === undefined) issues.push({ path: 'height', message: 'give the height of the column in mm' })
+  if (!(Number.isInteger(quantity) && quantity >= 1)) {
+    issues.push({ path: 'quantity', message: 'a whole number of at least 1' })
+  }
+  return issues
+}
+
+/**
+ * The cheapest shape as delivered that holds and keeps the limits, with what else would do: at least the lightest, the
+ * slimmest and five more where there are as many. When nothing fits, what stands in the way. Refuses by field.
+ */
+export function propose(input: ProposalInput): Proposal | NoProposal {
+  const { asked, catalogue, book, delivery } = input
+  const issues = lineIssues(asked)
+  if (issues.length > 0) throw new Refusal(issues)
+  const prepared = prepareColumn(asked)
+  const families = familiesFor(asked, book)
+  if (families.length === 0) refuse('limits.families', 'at least one family that the shop buys')
+  const screened = screenCatalogue(prepared, catalogue, steelsOf(families, asked.grade))
+  const holding = screened.filter((candidate) => limitsBroken(candidate, asked.limits).length === 0)
+  const terms = { book, delivery }
+  const ranked = rank(asked, holding, terms)
+  const chosen = input.section === undefined ? ranked[0] : chooseByName(input, prepared, terms)
+  if (!chosen) return nothingFits(asked, screened, holding, book)
+  const { section, steel, spec, base } = chosen
+  const { designation, designationSI, depth, width } = section
+  return {
+    found: true,
+    section: designation,
+    ...{ designationSI, outline: outlineOf(section), depth, width },
+    check: checkColumn(prepared, section, steel),
+    ...{ base, spec },
+    alternatives: alternativesOf(ranked),
+    nextLighter: nextLighter(asked, chosen, screened, ranked),
+    price: priceQuote({
+      ...{ book, delivery, lines: [{ spec, section }], discount: '0' },
+      tax: { rate: '0', exempt: false },
+    }),
+  }
+}
+
+/** The cheapest, and among them in their place the lightest and the slimmest. */
+function rank(asked: LineAsked, holding: readonly Candidate[], terms: PriceTerms): PricedCandidate[] {
+  const best = cheapest(asked, holding, terms, SHOWN)
+  const extremes = [leastBy(holding, ({ section }) => section.mass), leastBy(holding, planArea)]
+  const more = extremes.flatMap((candidate) => {
+    if (!candidate || best.some(({ section }) => section === candidate.section)) return []
+    const priced = priceOne(asked, candidate, terms)
+    return priced ? [priced] : []
+  })
+  const all = [...best, ...more.filter((one, index) => more.findIndex((other) => same(one, other)) === index)]
+  return all.sort((a, b) => a.price.delivered.amount - b.price.delivered.amount)
+}
+
+const same = (a: Candidate, b: Candidate) => a.section === b.section
+const planArea = ({ section }: { section: Section }) => section.depth * section.width
+
+function leastBy(
+  candidates: readonly Candidate[],
+  measure: (one: Candidate) => number,
+): Candidate | undefined {
+  let least: Candidate | undefined
+  for (const one of candidates) if (!least || measure(one) < measure(least)) least = one
+  return least
+}
+
+function alternativesOf(ranked: readonly PricedCandidate[]): Alternative[] {
+  const lightest = leastBy(ranked, ({ section }) => section.mass)
+  const slimmest = leastBy(ranked, planArea)
+  return ranked.map((one, index) => {
+    const { designation, designationSI, family, mass, depth, width } = one.section
+    const because: Alternative['because'] = index === 0 ? ['cheapest'] : []
+    if (one.section === lightest?.section) because.push('lightest')
+    if (one.section === slimmest?.section) because.push('slimmest')
+    const { utilisation } = one.screening
+    return {
+      section: designation,
+      ...{ designationSI, family, because, utilisation, mass, depth, width },
+      unitPrice: one.price.unitPrice,
+    }
+  })
+}
+
+type Chosen = Candidate & { spec: LineSpec; base: BaseDesign | null }
+
+/** A shape by its name, of any family that the shop buys: its verdict is the answer, whatever it is. */
+function chooseByName(
+  { asked, catalogue, book, section: name = '' }: ProposalInput,
+  prepared: PreparedColumn,
+  terms: PriceTerms,
+): Chosen {
+  const section = catalogue.find(name)
+  if (!section) return refuse('section', `${name} is not in the catalogue; a designation such as W10X49`)
+  const steels = steelsOf([section.family], asked.grade)
+  const [candidate] = screenCatalogue(prepared, { ...catalogue, ofFamilies: () => [section] }, steels)
+  if (!candidate)
+    return refuse('section', `${section.designation} has no strength by AISC 360 E7.2; choose a thicker wall`)
+  const priced = priceOne(asked, candidate, terms)
+  if (priced) return priced
+  const base = asked.base.plate ? baseOfLine(asked, book, section, candidate.screening) : null
+  return { ...candidate, base, spec: specOf(asked, candidate, base) }
+}
