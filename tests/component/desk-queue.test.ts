@@ -123,7 +123,7 @@ describe('the desk', () => {
     const { wrapper, router, calls } = await desk((call) =>
       call.path.endsWith('/quote') ? replies.shift() : undefined,
     )
-    const take = () => wrapper.get('[aria-label="Take up R-1001"]').trigger('click')
+    const take = () => wrapper.get('[aria-label="Take it up, R-1001"]').trigger('click')
     await take()
     await flushPromises()
     expect(wrapper.get('[role="alert"]').text()).not.toBe('')

@@ -16,6 +16,7 @@ export function useLeaveGuard(dirty: Ref<boolean>): void {
       'Leave this page?',
       'What you changed since it was last saved will be lost.',
       'Leave without saving',
+      'Stay here',
     )
   })
 }

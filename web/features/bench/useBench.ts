@@ -43,9 +43,12 @@ export function useBench(read: Ref<QuoteDto>) {
 
   /** What the page shows: the answer to the edit, or what is kept. */
   const shown = computed(() => (dirty.value && live.answer.value ? live.answer.value.quote : kept.value))
-  /** What is shown belongs to an earlier edit. */
+  /** The answer to what is typed is on its way; what is shown belongs to an earlier edit. */
   const behind = computed(
-    () => dirty.value && (asked.value === null || JSON.stringify(live.answer.value?.body) !== asked.value),
+    () =>
+      asked.value !== null &&
+      live.error.value === undefined &&
+      JSON.stringify(live.answer.value?.body) !== asked.value,
   )
 
   function take(quote: QuoteDto): void {

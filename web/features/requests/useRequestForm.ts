@@ -4,9 +4,10 @@ import type { Problem } from '../../../shared/contracts/common.ts'
 import type { RequestDto } from '../../../shared/contracts/requests.ts'
 import { problemOf } from '../../api/problem.ts'
 import { createRequest, editRequest, requestKeys, submitRequest } from '../../api/requests.ts'
+import { focusField } from '../../composables/focus-field.ts'
 import { copyLine, newLine, nextMark, type LineDraft } from './line-draft.ts'
 import { fromDto, issuesOf, newRequest, toBody, type RequestDraft } from './request-draft.ts'
-import { focusField, useFieldErrors } from './useFieldErrors.ts'
+import { useFieldErrors } from './useFieldErrors.ts'
 
 /** The request while it is written: its lines, what is wrong with them, and how it is kept. */
 export function useRequestForm(
