@@ -2,7 +2,7 @@ import { useQueryClient } from '@tanstack/vue-query'
 import { computed, ref, shallowRef, toRaw, watch, type Ref } from 'vue'
 import type { Problem } from '../../../shared/contracts/common.ts'
 import { quoteDto, type QuoteDto } from '../../../shared/contracts/quotes.ts'
-import { ApiProblem, problemOf } from '../../api/problem.ts'
+import { problemOf } from '../../api/problem.ts'
 import { editRevision, quoteKeys, readQuote, tryRevision, type RevisionInput } from '../../api/quotes.ts'
 import { useLatest } from '../../composables/useLatest.ts'
 import { carryOver, isChanged } from './edit-changes.ts'
@@ -71,19 +71,20 @@ export function useBench(read: Ref<QuoteDto>) {
     else kept.value = quote
   })
 
-  /** Somebody else kept something first: what they kept, from the refusal itself or read again. */
+  /** Somebody else was first: what stands now, from the refusal itself or read again. An edit is not touched by it. */
   async function meetNewer(refused: Problem): Promise<void> {
     const told = quoteDto.safeParse(refused.current)
-    newer.value = told.success ? told.data : await readQuote(kept.value.id)
+    const found = told.success ? told.data : await readQuote(kept.value.id)
+    if (dirty.value) newer.value = found
+    else take(found)
+    problem.value = dirty.value && refused.type === 'stale-version' ? null : refused
   }
 
   async function fail(error: unknown): Promise<void> {
-    problem.value = problemOf(error)
-    if (!(error instanceof ApiProblem) || error.problem.type !== 'stale-version') return
-    await meetNewer(error.problem).then(
-      () => (problem.value = null),
-      (other: unknown) => (problem.value = problemOf(other)),
-    )
+    const refused = problemOf(error)
+    problem.value = refused
+    if (refused.type !== 'stale-version' && refused.type !== 'not-allowed-now') return
+    await meetNewer(refused).catch((other: unknown) => (problem.value = problemOf(other)))
   }
 
   async function keep(): Promise<boolean> {
