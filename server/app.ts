@@ -9,15 +9,27 @@ import { ownSiteOnly } from './http/cross-site.ts'
 import { pages } from './http/pages.ts'
 import { noSuchOperation, problems } from './http/problem.ts'
 import { neverStored, securityHeaders } from './http/security-headers.ts'
+import { accountRoutes } from './modules/accounts/accounts.routes.ts'
 import { apiDescriptionRoutes } from './modules/api-description/api-description.routes.ts'
 import { auditRoutes } from './modules/audit/audit.routes.ts'
 import { healthRoutes } from './modules/health/health.routes.ts'
+import { engineRoutes } from './modules/engine/engine.routes.ts'
+import { requestRoutes } from './modules/requests/requests.routes.ts'
+import { quoteRoutes } from './modules/quotes/quotes.routes.ts'
+import { orderRoutes } from './modules/orders/orders.routes.ts'
+import { paymentRoutes } from './modules/payments/payments.routes.ts'
 import { peopleRoutes } from './modules/people/people.routes.ts'
 import { priceBookRoutes } from './modules/price-books/price-books.routes.ts'
 import { sessionRoutes } from './modules/sessions/sessions.routes.ts'
 
 const MODULES = [
   sessionRoutes,
+  engineRoutes,
+  requestRoutes,
+  quoteRoutes,
+  orderRoutes,
+  paymentRoutes,
+  accountRoutes,
   peopleRoutes,
   priceBookRoutes,
   auditRoutes,

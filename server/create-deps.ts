@@ -3,6 +3,7 @@ import { catalogue } from '../seeds/reference/catalogue.ts'
 import type { Config } from './config.ts'
 import { openDatabase } from './db/open-database.ts'
 import type { Deps } from './deps.ts'
+import { createEngine } from './engine/engine.ts'
 import { createLinks } from './http/links.ts'
 import { createLogger } from './logger.ts'
 import { createMailer } from './mail/mailer.ts'
@@ -24,6 +25,7 @@ export function createDeps(config: Config, clock: () => Date = () => new Date())
     passwords: createPasswords(workerFile('passwords', 'passwords')),
     storage: createStorage(join(config.dataDir, 'files')),
     press: createDocumentPress(workerFile('pdf', 'quote-document')),
+    engine: createEngine(workerFile('engine', 'engine')),
     mailer: createMailer(config),
     stripe: createStripe(config),
     shop: readShop(config),
@@ -31,8 +33,8 @@ export function createDeps(config: Config, clock: () => Date = () => new Date())
   }
 }
 
-export async function closeDeps({ db, passwords, press, mailer }: Deps): Promise<void> {
+export async function closeDeps({ db, engine, passwords, press, mailer }: Deps): Promise<void> {
   mailer.close()
-  await Promise.all([passwords.close(), press.close()])
+  await Promise.all([engine.close(), passwords.close(), press.close()])
   await db.destroy()
 }

@@ -4,6 +4,7 @@ import type Stripe from 'stripe'
 import type { Catalogue } from '../shared/sections/catalogue.ts'
 import type { Config } from './config.ts'
 import type { Db } from './db/open-database.ts'
+import type { Engine } from './engine/engine.ts'
 import type { Links } from './http/links.ts'
 import type { Passwords } from './passwords/passwords.ts'
 import type { DocumentPress } from './pdf/document-press.ts'
@@ -20,6 +21,7 @@ export interface Deps {
   passwords: Passwords
   storage: Storage
   press: DocumentPress
+  engine: Engine
   mailer: Transporter
   stripe: Stripe
   catalogue: Catalogue

@@ -1,4 +1,4 @@
-import { createServer, type Server } from 'node:http'
+import { createServer } from 'node:http'
 import { fileURLToPath } from 'node:url'
 import { DEMO_PASSWORD, DEMO_PEOPLE } from '../seeds/demo/people.ts'
 import { createApp } from './app.ts'
@@ -8,13 +8,11 @@ import { migrate } from './db/migrate.ts'
 import type { Deps } from './deps.ts'
 import { startFakes } from './fakes.ts'
 import { startJobs } from './jobs/scheduler.ts'
-import { moneyJobs } from './modules/payments/payments.jobs.ts'
+import { jobsOf } from './jobs/jobs.ts'
+import { listen } from './listen.ts'
 import { seed } from './seed.ts'
 
 const PAGES = fileURLToPath(new URL('../../web/dist', import.meta.url))
-
-/** Requests under way are given this long when the process is told to end. */
-const GRACE_MS = 8000
 
 async function start(): Promise<void> {
   const config = readConfig()
@@ -22,20 +20,15 @@ async function start(): Promise<void> {
   await migrate(deps.db)
   await seed(deps)
   const fakes = config.mode === 'demo' ? await startFakes(config, deps.logger) : undefined
-  const server = createServer(createApp(deps, PAGES))
-  await listen(server, config)
-  const jobs = startJobs(moneyJobs(deps), deps.logger)
+  const server = await listen(createServer(createApp(deps, PAGES)), config.port, config.host)
+  const jobs = startJobs(jobsOf(deps), deps.logger)
   welcome(config)
 
   let ending = false
   async function end(): Promise<void> {
     if (ending) return
     ending = true
-    const closed = new Promise((resolve) => server.close(resolve))
-    const late = setTimeout(() => server.closeAllConnections(), GRACE_MS)
-    server.closeIdleConnections()
-    await closed
-    clearTimeout(late)
+    await server.stop()
     await jobs.stop()
     await fakes?.stop()
     await closeDeps(deps)
@@ -43,13 +36,6 @@ async function start(): Promise<void> {
   for (const signal of ['SIGINT', 'SIGTERM'] as const) {
     process.on(signal, () => void end().catch((error: unknown) => giveUp(deps, error)))
   }
-}
-
-function listen(server: Server, { port, host }: Config): Promise<void> {
-  return new Promise((resolve, reject) => {
-    server.once('error', reject)
-    server.listen(port, host, () => resolve())
-  })
 }
 
 function welcome({ mode, publicUrl, mail, stripe }: Config): void {

@@ -10,7 +10,6 @@ export function findAnswer(db: Reader, owner: string, key: string): Promise<Idem
     .executeTakeFirst()
 }
 
-/** Two at once with one key: the second meets the key of the first and is undone as a whole. */
 export async function keepAnswer(trx: Trx, row: IdempotencyTable): Promise<void> {
   await trx.insertInto('idempotency').values(row).execute()
 }

@@ -40,8 +40,21 @@ export function repeatable(
   return { owner, key, fingerprint }
 }
 
+/** Does it, or answers as before; a call that runs beside its twin gets the answer of whichever came first. */
+export async function answerOnce(db: Db, call: Repeatable, doIt: () => Promise<unknown>): Promise<unknown> {
+  const before = await answeredBefore(db, call)
+  if (before) return before.answer
+  try {
+    return await doIt()
+  } catch (error) {
+    const meanwhile = await answeredBefore(db, call)
+    if (meanwhile) return meanwhile.answer
+    throw error
+  }
+}
+
 /** The answer that was given before to the same call; undefined when it is new. */
-export async function answeredBefore(db: Db, call: Repeatable): Promise<{ answer: unknown } | undefined> {
+async function answeredBefore(db: Db, call: Repeatable): Promise<{ answer: unknown } | undefined> {
   const row = await findAnswer(db, call.owner, call.key)
   if (!row) return undefined
   if (row.fingerprint !== call.fingerprint) {
@@ -53,6 +66,8 @@ export async function answeredBefore(db: Db, call: Repeatable): Promise<{ answer
 export function onceFor(call: Repeatable | undefined, now: () => Date): Once {
   return async (trx, answer) => {
     if (!call) return
+    // Somebody was quicker with the same key: all of this is undone, and theirs is answered.
+    if (await findAnswer(trx, call.owner, call.key)) fail('conflict', 'This was just done by another call.')
     await keepAnswer(trx, { ...call, answer: JSON.stringify(answer), createdAt: now().toISOString() })
   }
 }

@@ -19,7 +19,7 @@ export interface LinkPrincipal {
 }
 export type Principal = { kind: 'nobody' } | PersonPrincipal | LinkPrincipal
 
-export function isShop(principal: Principal): principal is PersonPrincipal {
+export function isShop(principal: Principal): boolean {
   return principal.kind === 'person' && principal.role !== 'contractor'
 }
 

@@ -12,7 +12,7 @@ import {
 import type { Deps } from '../deps.ts'
 import { fail } from '../errors.ts'
 import { sendFile, type FileAnswer } from './file-answer.ts'
-import { answeredBefore, onceFor, repeatable, type Once } from './once.ts'
+import { answerOnce, onceFor, repeatable, type Once } from './once.ts'
 import { principalFor } from './read-principal.ts'
 import type { Principal } from './principal.ts'
 import { issuesOf } from './problem.ts'
@@ -50,17 +50,16 @@ export function route<Id extends OperationId>(
       body: parse(operation.body, bodyOf(operation, req), 'Some fields are not right.'),
     }
     const call = operation.idempotent && repeatable(id, principal, req.get('idempotency-key'), asked)
-    const before = call ? await answeredBefore(deps.db, call) : undefined
-    const answer = before
-      ? before.answer
-      : await handle({
-          ...(asked as Pick<Call<Id>, 'params' | 'query' | 'body'>),
-          principal,
-          ifMatch: operation.ifMatch ? versionIn(req) : 0,
-          once: onceFor(call || undefined, deps.clock),
-          req,
-          res,
-        })
+    const doIt = () =>
+      handle({
+        ...(asked as Pick<Call<Id>, 'params' | 'query' | 'body'>),
+        principal,
+        ifMatch: operation.ifMatch ? versionIn(req) : 0,
+        once: onceFor(call || undefined, deps.clock),
+        req,
+        res,
+      })
+    const answer = call ? await answerOnce(deps.db, call, doIt) : await doIt()
     if (operation.answer === 'file') sendFile(res, answer as FileAnswer)
     else if (operation.status === 204) res.status(204).end()
     else res.status(operation.status ?? 200).json(operation.answer.parse(answer))

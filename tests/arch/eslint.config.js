@@ -28,7 +28,9 @@ export default tseslint.config(
       '@typescript-eslint/ban-ts-comment': ['error', { 'ts-expect-error': 'allow-with-description' }],
       // The log is structured; a stray print is a leak.
       'no-console': 'error',
-      eqeqeq: 'error',
+      eqeqeq: ['error', 'always', { null: 'ignore' }],
+      // Taking a field out of an object names it and leaves it.
+      '@typescript-eslint/no-unused-vars': ['error', { ignoreRestSiblings: true, argsIgnorePattern: '^_' }],
       // A page shows data as text, never as markup.
       'vue/no-v-html': 'error',
       // Layout is prettier's.

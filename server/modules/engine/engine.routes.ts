@@ -1,0 +1,14 @@
+import { Router } from 'express'
+import type { Deps } from '../../deps.ts'
+import { route } from '../../http/route.ts'
+import { checkColumn, designBasePlate, listSections, propose, readSection } from './engine.service.ts'
+
+export function engineRoutes(deps: Deps): Router {
+  const router = Router()
+  route(router, deps, 'checkColumn', ({ principal, body }) => checkColumn(deps, principal, body))
+  route(router, deps, 'designBasePlate', ({ body }) => designBasePlate(deps, body))
+  route(router, deps, 'propose', ({ principal, body }) => propose(deps, principal, body))
+  route(router, deps, 'listSections', ({ query }) => Promise.resolve(listSections(deps, query)))
+  route(router, deps, 'readSection', ({ params }) => Promise.resolve(readSection(deps, params.designation)))
+  return router
+}

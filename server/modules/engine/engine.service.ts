@@ -1,0 +1,56 @@
+import type { AnswerOf, BodyOf, QueryOf } from '../../../shared/contracts/operations.ts'
+import type { ProposalAnswerDto } from '../../../shared/contracts/proposals.ts'
+import type { Deps } from '../../deps.ts'
+import { fail, notFound } from '../../errors.ts'
+import { isShop, type Principal } from '../../http/principal.ts'
+import { currentBook } from '../price-books/price-books.service.ts'
+import { priceForCustomer } from '../price-books/customer-price.service.ts'
+import { toSectionDetail, toSectionSummary } from './sections.map.ts'
+
+export function listSections(
+  { catalogue }: Deps,
+  { family, q, limit }: QueryOf<'listSections'>,
+): AnswerOf<'listSections'> {
+  const found = catalogue.search(q ?? '', family ? [family] : undefined)
+  return { items: found.slice(0, limit).map(toSectionSummary) }
+}
+
+export function readSection({ catalogue }: Deps, designation: string): AnswerOf<'readSection'> {
+  return toSectionDetail(catalogue.find(designation) ?? notFound('section'))
+}
+
+/** Strengths that are no steel's are for the estimator to answer for. */
+function checkGrade(principal: Principal, { grade }: Pick<BodyOf<'checkColumn'>, 'grade'>): void {
+  if (isShop(principal) || grade === undefined || typeof grade === 'string') return
+  fail('invalid-input', 'Some fields are not right.', {
+    issues: [{ path: 'grade', message: 'the name of a steel; other strengths are the estimator’s to give' }],
+  })
+}
+
+export async function checkColumn(
+  { engine }: Deps,
+  principal: Principal,
+  body: BodyOf<'checkColumn'>,
+): Promise<AnswerOf<'checkColumn'>> {
+  checkGrade(principal, body)
+  return engine.run('check', body)
+}
+
+export async function designBasePlate(
+  { engine, db, clock }: Deps,
+  body: BodyOf<'designBasePlate'>,
+): Promise<AnswerOf<'designBasePlate'>> {
+  return engine.run('basePlate', { body, book: await currentBook(db, clock()) })
+}
+
+/** The shape that the engine offers, at the price that the caller may see. Nothing is kept. */
+export async function propose(
+  { engine, db, clock }: Deps,
+  principal: Principal,
+  body: BodyOf<'propose'>,
+): Promise<ProposalAnswerDto> {
+  checkGrade(principal, body)
+  const answer = await engine.run('propose', { body, book: await currentBook(db, clock()) })
+  if (!answer.found || isShop(principal)) return answer
+  return { ...answer, price: priceForCustomer(answer.price) }
+}
