@@ -129,7 +129,7 @@ describe('a quote', () => {
     const cost = current.price.lines[0]?.cost
     expect(cost?.lines.length).toBeGreaterThan(5)
     const { subtotal, delivery, tax, total } = current.price
-    expect(subtotal.amount + delivery.price.amount + tax.amount).toBe(total.amount)
+    expect(subtotal.amount + delivery.price.amount + tax.amount.amount).toBe(total.amount)
     // Not sent: for its customer it is not there.
     await contractor.get(`/api/quotes/${quote.id}`).expect(404)
   })

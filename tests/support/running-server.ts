@@ -1,27 +1,11 @@
 import { spawn, type ChildProcess } from 'node:child_process'
 import { mkdtempSync, rmSync } from 'node:fs'
-import { createServer } from 'node:net'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { fileURLToPath } from 'node:url'
+import { freePorts } from './free-ports.ts'
 
 const root = fileURLToPath(new URL('../..', import.meta.url))
-
-/** Four free ports in a row: application, card page, mailbox, SMTP. */
-async function freePorts(): Promise<number> {
-  const isFree = (port: number) =>
-    new Promise<boolean>((resolve) => {
-      const probe = createServer()
-      probe.once('error', () => resolve(false))
-      probe.listen(port, '127.0.0.1', () => probe.close(() => resolve(true)))
-    })
-  for (let attempt = 0; attempt < 50; attempt += 1) {
-    const first = 20_000 + Math.floor(Math.random() * 20_000)
-    const free = await Promise.all([0, 1, 2, 3].map((offset) => isFree(first + offset)))
-    if (free.every(Boolean)) return first
-  }
-  throw new Error('no four free ports in a row')
-}
 
 async function untilHealthy(url: string, child: ChildProcess, output: () => string): Promise<void> {
   const deadline = Date.now() + 30_000
@@ -50,7 +34,8 @@ export class RunningServer {
     this.#port ||= await freePorts()
     this.url = `http://localhost:${this.#port}`
     this.mailboxUrl = `http://localhost:${this.#port + 2}`
-    const { NODE_ENV: _mode, ...env } = process.env
+    // Vitest's own mode is none of the server's.
+    const env = { ...process.env, NODE_ENV: '' }
     const child = spawn(process.execPath, ['server/dist/main.js'], {
       cwd: root,
       env: { ...env, PORT: String(this.#port), DATA_DIR: this.dataDir },
