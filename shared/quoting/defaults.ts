@@ -48,11 +48,15 @@ export function lineSpecOf(chosen: ChosenLine): LineSpec {
       holes: { count: base.holes.count, diameter: base.holes.diameter },
     },
     cap,
-    rods: base && chosen.withRods ? { ...base.rods } : null,
+    rods: base && chosen.withRods ? rodsOf(base) : null,
     welds,
     extras: [],
     overrides: [],
   }
+}
+
+function rodsOf({ rods: { count, diameter, grade } }: BaseDesign): LineSpec['rods'] {
+  return { count, diameter, grade }
 }
 
 /** Standard hole of a ¾ in bolt: 13/16 in (AISC 360-22 Table J3.3). */
