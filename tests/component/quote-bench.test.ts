@@ -77,6 +77,19 @@ describe('the bench while a draft is changed', () => {
     expect(strip()).toContain('20,000.00')
   })
 
+  it('says that a base plate fails though every shape holds', async () => {
+    const failing = answered(0.6, 1)
+    const [line] = failing.current.lines
+    const bearing = line?.base?.checks[0]
+    if (line?.base && bearing) {
+      line.base = { ...line.base, verdict: 'fails', checks: [{ ...bearing, utilisation: 1.31 }] }
+    }
+    const { field, strip } = await bench(draft(), () => json(failing))
+    await field('base.thickness').setValue('8')
+    await pause()
+    expect(strip()).toContain('A1, base plate 131 % fails')
+  })
+
   it('asks and keeps nothing while a field is wrong, says what would be right and leads there', async () => {
     const { field, wrapper, calls, button } = await bench(draft())
     await field('base.thickness').setValue('300')
