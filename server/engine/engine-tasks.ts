@@ -36,10 +36,16 @@ function basePlate({ body, book }: { body: BodyOf<'designBasePlate'>; book: Pric
   })
 }
 
-function proposeOne({ body, book }: { body: BodyOf<'propose'>; book: PriceBook }): ProposalAnswerDto {
+interface ToPropose {
+  body: BodyOf<'propose'>
+  book: PriceBook
+  tax: { rate: string; exempt: boolean }
+}
+
+function proposeOne({ body, book, tax }: ToPropose): ProposalAnswerDto {
   const { delivery, section, ...asked } = body
   const terms = delivery && delivery.km > 0 ? { km: delivery.km } : null
-  return propose({ asked, catalogue, book, delivery: terms, section })
+  return propose({ asked, catalogue, book, delivery: terms, tax, section })
 }
 
 type Offer = RequestDto['lines'][number]['offered']

@@ -1,12 +1,6 @@
 import { CAUTIONS } from '../../shared/quoting/cautions.ts'
 import type { Letter } from './letters.ts'
-import { renderMail, type MailParts } from './render-mail.ts'
-
-export interface Mail {
-  subject: string
-  html: string
-  text: string
-}
+import { renderMail, type Mail, type MailParts } from './render-mail.ts'
 
 /** A letter in words, as HTML and as the plain text that says the same. */
 export function composeMail(letter: Letter): Mail {

@@ -1,5 +1,10 @@
 import { escapeHtml as escape } from '../html.ts'
-import type { Mail } from './compose-mail.ts'
+
+export interface Mail {
+  subject: string
+  html: string
+  text: string
+}
 
 export interface MailParts {
   shop: string

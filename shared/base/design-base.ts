@@ -3,9 +3,10 @@ import type { Method } from '../standards/aisc360/resistance.ts'
 import { Refusal, type Issue } from '../units/refusal.ts'
 import type { BaseDesign, BaseInput, BaseParts } from './base-design.ts'
 import { compressionChecks } from './compression-checks.ts'
-import { findBase } from './find-base.ts'
+import { leastLeg } from './fillet.ts'
+import { findBase, wallOf } from './find-base.ts'
 import { rodChecks } from './rod-checks.ts'
-import { POST_WEIGHT } from './rods.ts'
+import { FEWEST_RODS, POST_WEIGHT } from './rods.ts'
 import { weldChecks } from './weld-checks.ts'
 
 const NOT_COVERED =
@@ -40,7 +41,7 @@ function issuesOf({ standard, section, required, concrete, plate, rods, stock }:
   return issues
 }
 
-function notesOf(parts: BaseParts, { required, weight }: BaseInput): string[] {
+function notesOf(parts: BaseParts, { section, required, weight }: BaseInput): string[] {
   const notes = [NOT_COVERED]
   if (required.compression > 0) {
     notes.push(

@@ -35,7 +35,7 @@ export function rodChecks(input: BaseInput, parts: BaseParts, method: Method): F
   const steps = rodSteps(Fu, rods.diameter, method)
   const isPost = weight !== undefined && weight <= POST_WEIGHT
   const checks: Check[] = []
-  if (!isPost) checks.push(countCheck(rods.count))
+  if (!isPost && rods.count < FEWEST_RODS) checks.push(countCheck(rods.count))
   checks.push(worst ? erectionCheck(worst, capacity, steps) : noRoom(section.designation))
   const share = required.uplift / rods.count
   if (required.uplift > 0) checks.push(upliftCheck(required.uplift, rods.count, capacity, steps))

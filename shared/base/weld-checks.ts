@@ -6,7 +6,7 @@ import type { BaseInput, BaseParts } from './base-design.ts'
 import { E70, filletAvailable, filletNominal, leastLeg } from './fillet.ts'
 import { wallOf } from './find-base.ts'
 
-/** The fillet all round the shaft: not less than J2.4 asks for, and strong enough for uplift. */
+/** The fillet all round the shaft: not less than J2.4 asks for, which needs no check once it is kept; and uplift. */
 export function weldChecks(
   { section, required }: BaseInput,
   { plate, leg }: BaseParts,
@@ -63,7 +63,7 @@ export function weldChecks(
     notes: [],
   }
   return {
-    checks: required.uplift > 0 ? [legCheck, strength] : [legCheck],
+    checks: [...(leg < least ? [legCheck] : []), ...(required.uplift > 0 ? [strength] : [])],
     values: { weldAvailable: capacity, leastLeg: least },
   }
 }

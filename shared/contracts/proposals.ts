@@ -40,7 +40,10 @@ export const noProposal = z.object({
   nearest: z.object({ section: z.string(), utilisation: z.number(), needs: z.string() }).nullable(),
 })
 export const proposalBody = lineRequirement.extend({
-  delivery: z.strictObject({ km: z.number().min(0).max(5000) }).optional(),
+  /** Left out: collected. With a tax region that the shop knows, tax is in the price. */
+  delivery: z
+    .strictObject({ km: z.number().min(0).max(5000), region: z.string().trim().max(40).optional() })
+    .optional(),
   /** Another shape than the cheapest: the one to propose. */
   section: z.string().trim().min(1).max(60).optional(),
 })

@@ -50,6 +50,8 @@ export interface ProposalInput {
   book: PriceBook
   /** null: collected. */
   delivery: { km: number } | null
+  /** Left out: none. */
+  tax?: { rate: string; exempt: boolean } | undefined
   /** Another shape than the cheapest: the one to propose, whether it holds or not. */
   section?: string | undefined
 }
@@ -96,7 +98,7 @@ export function propose(input: ProposalInput): Proposal | NoProposal {
     nextLighter: nextLighter(asked, chosen, screened, ranked),
     price: priceQuote({
       ...{ book, delivery, lines: [{ spec, section }], discount: '0' },
-      tax: { rate: '0', exempt: false },
+      tax: input.tax ?? { rate: '0', exempt: false },
     }),
   }
 }

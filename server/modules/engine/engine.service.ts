@@ -2,7 +2,9 @@ import type { AnswerOf, BodyOf, QueryOf } from '../../../shared/contracts/operat
 import type { ProposalAnswerDto } from '../../../shared/contracts/proposals.ts'
 import type { Deps } from '../../deps.ts'
 import { fail, notFound } from '../../errors.ts'
-import { isShop, type Principal } from '../../http/principal.ts'
+import { isShop, personOf, type Principal } from '../../http/principal.ts'
+import { taxRateOf } from '../../shop.ts'
+import { companyOf } from '../companies/companies.service.ts'
 import { currentBook } from '../price-books/price-books.service.ts'
 import { priceForCustomer } from '../price-books/customer-price.service.ts'
 import { toSectionDetail, toSectionSummary } from './sections.map.ts'
@@ -45,12 +47,18 @@ export async function designBasePlate(
 
 /** The shape that the engine offers, at the price that the caller may see. Nothing is kept. */
 export async function propose(
-  { engine, db, clock }: Deps,
+  { engine, db, clock, shop }: Deps,
   principal: Principal,
   body: BodyOf<'propose'>,
 ): Promise<ProposalAnswerDto> {
   checkGrade(principal, body)
-  const answer = await engine.run('propose', { body, book: await currentBook(db, clock()) })
+  const { companyId } = personOf(principal)
+  const exempt = companyId !== null && (await companyOf(db, companyId)).taxCertificate !== null
+  const rate = taxRateOf(shop, body.delivery?.region ?? '') ?? '0'
+  const answer = await engine.run('propose', {
+    ...{ body, tax: { rate, exempt } },
+    book: await currentBook(db, clock()),
+  })
   if (!answer.found || isShop(principal)) return answer
   return { ...answer, price: priceForCustomer(answer.price) }
 }

@@ -13,7 +13,7 @@ interface Asked {
 }
 
 /** The shape and price of the mark in hand, asked again as it changes; the last answer of each mark is remembered. */
-export function useLineAnswer(line: Ref<LineDraft>, km: Ref<number | undefined>) {
+export function useLineAnswer(line: Ref<LineDraft>, to: Ref<{ km: number | undefined; region: string }>) {
   const answers = shallowReactive(new Map<string, ProposalAnswerDto>())
   const latest = useLatest(async (input: { key: string; body: ProposalInput }, signal): Promise<Asked> => {
     return { key: input.key, answer: await propose(input.body, signal) }
@@ -26,7 +26,7 @@ export function useLineAnswer(line: Ref<LineDraft>, km: Ref<number | undefined>)
     const { look } = line.value
     return {
       ...toRequirement(line.value),
-      ...(km.value === undefined ? {} : { delivery: { km: km.value } }),
+      ...(to.value.km === undefined ? {} : { delivery: { km: to.value.km, region: to.value.region } }),
       ...(look ? { section: look } : {}),
     }
   })
