@@ -1,15 +1,11 @@
 import { CAUTIONS } from '../../shared/quoting/cautions.ts'
+import { dateText } from '../money-and-dates.ts'
 import type { Letter } from './letters.ts'
 import { renderMail, type Mail, type MailParts } from './render-mail.ts'
 
 /** A letter in words, as HTML and as the plain text that says the same. */
 export function composeMail(letter: Letter): Mail {
   return renderMail(partsOf(letter))
-}
-
-function dayOf(instant: string): string {
-  const format = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeZone: 'UTC' })
-  return format.format(new Date(instant))
 }
 
 const plural = (count: number, one: string) => `${count} ${one}${count === 1 ? '' : 's'}`
@@ -46,7 +42,7 @@ function partsOf(letter: Letter): MailParts {
         facts: [
           ['Job', title],
           ['Total', total],
-          ['Holds until', dayOf(validUntil)],
+          ['Holds until', dateText(validUntil)],
         ],
         action: { label: 'Open the quote', url },
         listTitle: 'Before you accept',
@@ -97,7 +93,7 @@ function partsOf(letter: Letter): MailParts {
         facts: [
           ['Job', title],
           ['Received', amount],
-          ['On', dayOf(at)],
+          ['On', dateText(at)],
         ],
         action: { label: 'See the order', url },
       }

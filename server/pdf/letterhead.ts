@@ -1,5 +1,5 @@
 import { quoteTitle, type QuoteDocument } from './quote-document.ts'
-import { dateText } from './money-and-dates.ts'
+import { dateText } from '../money-and-dates.ts'
 import { factColumns, type Fact } from './fact-columns.ts'
 import type { Sheet } from './sheet.ts'
 import { INK } from './type-style.ts'

@@ -1,7 +1,7 @@
 import type { QuoteLineDto } from '../../shared/contracts/quotes.ts'
 import { heightLabel } from '../../shared/drawing/labels.ts'
 import { formatQuantity } from '../../shared/units/render.ts'
-import { dateText, moneyText } from './money-and-dates.ts'
+import { dateText, moneyText } from '../money-and-dates.ts'
 import type { QuoteDocument } from './quote-document.ts'
 import type { Sheet } from './sheet.ts'
 import { table, type Cell } from './table.ts'

@@ -51,6 +51,14 @@ function notesOf(parts: BaseParts, { section, required, weight }: BaseInput): st
   if (weight !== undefined && weight <= POST_WEIGHT) {
     notes.push('It weighs 300 lb or less: by 29 CFR 1926.751 it is a post, and need not have four rods.')
   }
+  const { count } = parts.rods
+  if (count >= FEWEST_RODS) {
+    notes.push(`${count} rods; a column needs at least four by 29 CFR 1926.755(a)(1).`)
+  }
+  const thinner = Math.min(wallOf(section), parts.plate.thickness)
+  notes.push(
+    `Fillet of ${parts.leg} mm all round; AISC 360 Table J2.4 asks for ${leastLeg(thinner)} mm where the thinner part is ${thinner.toFixed(1)} mm.`,
+  )
   notes.push(
     `Holes are ${parts.hole.toFixed(0)} mm, oversize for setting: each rod has a plate washer over them.`,
   )

@@ -237,7 +237,7 @@ describe('the round', () => {
       ['/people', 'Idris Vane'],
       ['/price-book', 'Shop rate'],
       ['/audit', /deposit received/],
-      ['/sections', /W44X/],
+      ['/sections', /W1100X/],
     ] as const) {
       await admin.goto(place)
       await admin.getByText(text).first().waitFor()

@@ -1,8 +1,9 @@
 import type Stripe from 'stripe'
-import { money, moneyToDecimal } from '../../../shared/pricing/money.ts'
+import { money } from '../../../shared/pricing/money.ts'
 import { statusAfter } from '../../../shared/quoting/may-move.ts'
 import { write, type Trx } from '../../db/open-database.ts'
 import type { Deps } from '../../deps.ts'
+import { moneyText } from '../../money-and-dates.ts'
 import { postToLedger } from '../accounts/ledger.service.ts'
 import { recordAudit } from '../audit/audit.service.ts'
 import { orderForPayment, releaseOrder } from '../orders/orders.service.ts'
@@ -84,7 +85,7 @@ async function bookDeposit(
       kind: 'deposit receipt',
       data: {
         ...{ name: order.contact.name, shop: shop.name, order: order.number, title: order.title, at },
-        amount: `${amount.currency} ${moneyToDecimal(amount)}`,
+        amount: moneyText(amount),
         url: `${config.publicUrl}/orders/${order.id}`,
       },
     },
@@ -122,7 +123,7 @@ export async function failPayment(
         kind: 'payment failed',
         data: {
           ...{ name: order.contact.name, shop: shop.name, order: order.number, title: order.title, reason },
-          amount: `${amount.currency} ${moneyToDecimal(amount)}`,
+          amount: moneyText(amount),
           url: `${config.publicUrl}/orders/${order.id}`,
         },
       },

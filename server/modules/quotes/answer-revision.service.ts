@@ -1,7 +1,6 @@
 import type { AnswerOf, BodyOf, ParamsOf } from '../../../shared/contracts/operations.ts'
 import type { QuoteDto } from '../../../shared/contracts/quotes.ts'
 import { pricedQuote } from '../../../shared/contracts/pricing.ts'
-import { moneyToDecimal } from '../../../shared/pricing/money.ts'
 import { revisionName } from '../../../shared/quoting/numbering.ts'
 import { answerFault } from '../../../shared/quoting/revisions.ts'
 import { write, type Trx } from '../../db/open-database.ts'
@@ -9,6 +8,7 @@ import type { Deps } from '../../deps.ts'
 import { fail } from '../../errors.ts'
 import type { Once } from '../../http/once.ts'
 import { actorOf, nameForAudit, type Principal } from '../../http/principal.ts'
+import { moneyText } from '../../money-and-dates.ts'
 import { createOrder } from '../orders/orders.service.ts'
 import { enqueueMail } from '../outbox/outbox.service.ts'
 import { followQuote } from '../requests/requests.service.ts'
@@ -48,7 +48,7 @@ export async function acceptRevision(
       ...{ total: price.total, deposit: price.deposit, acceptedBy: name, at },
     })
     await followQuote(trx, quote.requestId, 'close', { actor: 'system', who: 'the desk', at })
-    const deposit = `${price.deposit.currency} ${moneyToDecimal(price.deposit)}`
+    const deposit = moneyText(price.deposit)
     await tellBoth(trx, deps, parts, { letter, acceptedBy: name, order, deposit, at })
     const answer = { order }
     await once(trx, answer)

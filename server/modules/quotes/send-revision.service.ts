@@ -1,6 +1,6 @@
 import type { ParamsOf } from '../../../shared/contracts/operations.ts'
 import type { QuoteDto } from '../../../shared/contracts/quotes.ts'
-import { money, moneyToDecimal } from '../../../shared/pricing/money.ts'
+import { money } from '../../../shared/pricing/money.ts'
 import { mayMove } from '../../../shared/quoting/may-move.ts'
 import { revisionName } from '../../../shared/quoting/numbering.ts'
 import { holdsUntil } from '../../../shared/quoting/revisions.ts'
@@ -8,6 +8,7 @@ import { write, type Trx } from '../../db/open-database.ts'
 import type { Deps } from '../../deps.ts'
 import type { Once } from '../../http/once.ts'
 import { actorOf, nameForAudit, type Principal } from '../../http/principal.ts'
+import { moneyText } from '../../money-and-dates.ts'
 import { enqueueMail } from '../outbox/outbox.service.ts'
 import { followQuote } from '../requests/requests.service.ts'
 import { quoteForCustomer, toQuote, type QuoteParts } from './quotes.map.ts'
@@ -102,7 +103,7 @@ async function mailQuote(
         shop: shop.name,
         quote: name,
         title: quote.title,
-        total: `${total.currency} ${moneyToDecimal(total)}`,
+        total: moneyText(total),
         validUntil: row.validUntil ?? '',
         note: row.note,
         url: `${config.publicUrl}/q#${token}`,

@@ -1,4 +1,4 @@
-import type { MoneyDto } from '../../shared/contracts/common.ts'
+import type { MoneyDto } from '../shared/contracts/common.ts'
 
 const formats = new Map<string, Intl.NumberFormat>()
 
