@@ -10,6 +10,11 @@ export const person = z.object({
   company: z.object({ id, name: z.string() }).nullable(),
 })
 export type PersonDto = z.infer<typeof person>
-export const sessionAnswer = z.object({ person: person.nullable(), demo: z.boolean() })
+export const sessionAnswer = z.object({
+  person: person.nullable(),
+  demo: z.boolean(),
+  /** Where the shop delivers to and knows the tax of; empty for nobody. */
+  taxRegions: z.array(z.string()),
+})
 export const personRow = person.extend({ active: z.boolean(), lastSignInAt: z.string().nullable() })
 export const signedName = text(120)

@@ -9,15 +9,21 @@ import * as api from '../api/session.ts'
 export const useSessionStore = defineStore('session', () => {
   const person = ref<PersonDto | null>(null)
   const demo = ref(false)
+  const taxRegions = ref<string[]>([])
   const role = computed(() => person.value?.role ?? null)
   let asked: Promise<void> | undefined
+
+  function take(answer: Awaited<ReturnType<typeof api.readSession>>): void {
+    person.value = answer.person
+    demo.value = answer.demo
+    taxRegions.value = answer.taxRegions
+  }
 
   /** Asks once; a guard may wait for it on every way in. */
   function ready(): Promise<void> {
     asked ??= api.readSession().then(
       (answer) => {
-        person.value = answer.person
-        demo.value = answer.demo
+        take(answer)
       },
       () => {
         asked = undefined
@@ -30,8 +36,7 @@ export const useSessionStore = defineStore('session', () => {
     const answer = await api.signIn({ email, password })
     quoteLink.forget()
     queryClient.clear()
-    person.value = answer.person
-    demo.value = answer.demo
+    take(answer)
   }
 
   async function signOut(): Promise<void> {
@@ -40,5 +45,5 @@ export const useSessionStore = defineStore('session', () => {
     queryClient.clear()
   }
 
-  return { person, demo, role, ready, signIn, signOut }
+  return { person, demo, taxRegions, role, ready, signIn, signOut }
 })
