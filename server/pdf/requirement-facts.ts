@@ -1,3 +1,4 @@
+import { FAMILY_NAMES } from '../../shared/sections/family-names.ts'
 import type { LineRequirement } from '../../shared/contracts/requirement.ts'
 import { braceHolds } from '../../shared/drawing/describe-column.ts'
 import { detailLabel, forceLabel, heightLabel } from '../../shared/drawing/labels.ts'
@@ -77,7 +78,7 @@ function offsetText({ strong, weak }: NonNullable<LineRequirement['offset']>, sy
 
 function limitsText(limits: LineRequirement['limits'], system: UnitSystem): string {
   const parts: string[] = []
-  if (limits.families) parts.push(`families ${limits.families.join(', ')}`)
+  if (limits.families) parts.push(limits.families.map((family) => FAMILY_NAMES[family]).join(' or '))
   if (limits.maxDepth) parts.push(`depth to ${detailLabel(limits.maxDepth, system)}`)
   if (limits.maxWidth) parts.push(`width to ${detailLabel(limits.maxWidth, system)}`)
   if (limits.maxSlenderness) parts.push(`slenderness to ${figures(limits.maxSlenderness)}`)

@@ -65,7 +65,7 @@ export function checkColumn(prepared: PreparedColumn, section: Section, steel: S
     checks: [
       required,
       ...modes.map((one) => compressionCheck(section, one, input, method, demand.compression)),
-      ...localChecks(section, E_AISC, steel.Fy),
+      ...localChecks(section, E_AISC, steel.Fy, mode.Fn),
       ...(demand.uplift > 0 ? [tension] : []),
     ],
     assumptions: assumptionsOf(prepared, steel),

@@ -238,7 +238,7 @@ describe('the round', () => {
       ['/people', 'Idris Vane'],
       ['/price-book', 'Shop rate'],
       ['/audit', /deposit received/],
-      ['/sections', /W1100X/],
+      ['/sections', 'W4X13'],
     ] as const) {
       await admin.goto(place)
       await admin.getByText(text).first().waitFor()

@@ -1,3 +1,4 @@
+import { FAMILY_NAMES } from '../../shared/sections/family-names.ts'
 import type { Finish } from '../../shared/pricing/line-spec.ts'
 import type { Family } from '../../shared/sections/section.ts'
 
@@ -35,33 +36,17 @@ export const LIVE_CATEGORIES = [
   { value: 'H', text: 'H, roofs' },
 ] as const
 
-const FAMILY_WORDS: Record<Family, string> = {
-  W: 'W shapes',
-  HSS_SQUARE: 'Square HSS',
-  HSS_RECT: 'Rectangular HSS',
-  HSS_ROUND: 'Round HSS',
-  PIPE: 'Pipe',
-  HEA: 'HEA',
-  HEB: 'HEB',
-  HEM: 'HEM',
-  IPE: 'IPE',
-  UC: 'UC',
-  UB: 'UB',
-  SHS: 'SHS',
-  RHS: 'RHS',
-  CHS: 'CHS',
-}
-export const FAMILY_CHOICES = (Object.keys(FAMILY_WORDS) as Family[]).map((value) => ({
+export const FAMILY_CHOICES = (Object.keys(FAMILY_NAMES) as Family[]).map((value) => ({
   value,
-  text: FAMILY_WORDS[value],
+  text: FAMILY_NAMES[value],
 }))
 const AMERICAN: Family[] = ['W', 'HSS_SQUARE', 'HSS_RECT', 'HSS_ROUND', 'PIPE']
 
 /** Families to choose from: a standard's own ones. */
 export function familiesFor(european: boolean): Choice<Family>[] {
-  return (Object.keys(FAMILY_WORDS) as Family[])
+  return (Object.keys(FAMILY_NAMES) as Family[])
     .filter((family) => AMERICAN.includes(family) !== european)
-    .map((value) => ({ value, text: FAMILY_WORDS[value] }))
+    .map((value) => ({ value, text: FAMILY_NAMES[value] }))
 }
 
 export const END_CONDITIONS = ['pinned', 'fixed', 'guided', 'free'] as const
