@@ -5,6 +5,8 @@ import { OFFERED_FAMILIES, type Catalogue } from '../sections/catalogue.ts'
 import type { Family, Section } from '../sections/section.ts'
 import type { PreparedColumn } from '../standards/prepare-column.ts'
 import { roundRange } from '../standards/aisc360/effective-area.ts'
+import { boxLimits } from '../standards/aisc360/flexure-hss.ts'
+import { webFlexureLimit } from '../standards/aisc360/flexure-i.ts'
 import { screenColumn, type Screening } from '../standards/screen-column.ts'
 import { E_AISC } from '../materials/steel.ts'
 import { Refusal } from '../units/refusal.ts'
@@ -51,8 +53,16 @@ export function screenCatalogue(
     if (!steel || (section.shape === 'round' && section.diameterRatio >= roundRange(E_AISC, steel.Fy))) {
       return []
     }
+    if (prepared.bending && !coversFlexure(section, steel.Fy)) return []
     return [{ section, steel, screening: screenColumn(prepared, section, steel) }]
   })
+}
+
+/** Chapter F as far as it is here: webs that are compact (I) or not slender (HSS). */
+function coversFlexure(section: Section, Fy: number): boolean {
+  if (section.shape === 'I') return section.webRatio <= webFlexureLimit(E_AISC, Fy)
+  if (section.shape === 'round') return true
+  return Math.max(section.widthRatio, section.depthRatio) <= boxLimits(E_AISC, Fy).webSlender
 }
 
 /** The limits that a shape does not keep. */

@@ -8,10 +8,12 @@ import { effectiveArea } from './aisc360/effective-area.ts'
 import { localChecks } from './aisc360/local-check.ts'
 import { slenderness } from './aisc360/slenderness.ts'
 import { tensionCheck } from './aisc360/tension-check.ts'
+import { bendingChecks } from './bending-checks.ts'
 import { assumptionsOf, notCoveredOf, warningsOf } from './column-words.ts'
 import { demandOf, type PreparedColumn } from './prepare-column.ts'
 import { requiredSteps } from './required-steps.ts'
 import { compressionInput, screenColumn, type Screening } from './screen-column.ts'
+import type { BentScreening } from './screen-bending.ts'
 
 /** The whole answer for one shape: verdict, lengths by both methods, every check with its steps. N, mm, MPa. */
 export interface ColumnCheck {
@@ -46,16 +48,20 @@ export function checkColumn(prepared: PreparedColumn, section: Section, steel: S
     demand: inUplift ? demand.uplift : demand.compression,
     capacity: inUplift ? screening.tension : screening.capacity,
     unit: 'N',
-    utilisation: screening.utilisation,
+    utilisation: inUplift ? demand.uplift / screening.tension : demand.compression / screening.capacity,
     steps: [
       ...requiredSteps(prepared, section.mass, demand.compressionBy, 'Pr'),
       ...(demand.uplift > 0 ? requiredSteps(prepared, section.mass, demand.upliftBy, 'Tr').slice(-1) : []),
     ],
     notes: [],
   }
-  const governing = inUplift
-    ? { check: 'tension', axis: '', clause: 'D2', combination: demand.upliftBy.name }
-    : { ...governingCheck(mode), combination: demand.compressionBy.name }
+  const { bent } = screening
+  const byBending = bent !== undefined && bent.utilisation >= screening.utilisation
+  const governing = byBending
+    ? { check: 'interaction', axis: '', clause: 'H1', combination: bent.demand.combination.name }
+    : inUplift
+      ? { check: 'tension', axis: '', clause: 'D2', combination: demand.upliftBy.name }
+      : { ...governingCheck(mode), combination: demand.compressionBy.name }
   return {
     verdict: screening.utilisation <= 1 ? 'holds' : 'fails',
     utilisation: screening.utilisation,
@@ -67,6 +73,9 @@ export function checkColumn(prepared: PreparedColumn, section: Section, steel: S
       ...modes.map((one) => compressionCheck(section, one, input, method, demand.compression)),
       ...localChecks(section, E_AISC, steel.Fy, mode.Fn),
       ...(demand.uplift > 0 ? [tension] : []),
+      ...(prepared.bending && bent
+        ? bendingChecks(prepared, prepared.bending, section, steel.Fy, bent, screening)
+        : []),
     ],
     assumptions: assumptionsOf(prepared, steel),
     warnings: warningsOf(prepared, section, lengths, demand.uplift),
@@ -83,7 +92,7 @@ function valuesOf(
   section: Section,
   { Fy, Fu }: Steel,
   mode: Mode,
-  { capacity, tension, compression, uplift }: Screening,
+  { capacity, tension, compression, uplift, bent }: Screening,
   lengths: ColumnLengths,
 ): Record<string, number> {
   return {
@@ -100,5 +109,20 @@ function valuesOf(
     required: compression,
     tensionAvailable: tension,
     uplift,
+    ...(bent ? bentValues(bent) : {}),
+  }
+}
+
+function bentValues(bent: BentScreening): Record<string, number> {
+  const { capacityStrong, capacityWeak, amplifierStrong, amplifierWeak, utilisation, demand } = bent
+  return {
+    momentAvailableStrong: capacityStrong,
+    momentAvailableWeak: capacityWeak,
+    momentStrong: demand.momentStrong,
+    momentWeak: demand.momentWeak,
+    // Left out where the column is unstable: it has none.
+    ...(amplifierStrong === undefined ? {} : { amplifierStrong }),
+    ...(amplifierWeak === undefined ? {} : { amplifierWeak }),
+    interaction: utilisation,
   }
 }

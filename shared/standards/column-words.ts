@@ -10,7 +10,8 @@ import {
 import type { PreparedColumn } from './prepare-column.ts'
 
 /** What was taken where the customer did not say, and what every check here rests on. */
-export function assumptionsOf({ request, terms }: PreparedColumn, steel: Steel): string[] {
+export function assumptionsOf(prepared: PreparedColumn, steel: Steel): string[] {
+  const { request, terms } = prepared
   const { standard, method, combinations, liveFactor } = terms
   const said: string[] = []
   if (request.standard === undefined || request.method === undefined) {
@@ -37,7 +38,9 @@ export function assumptionsOf({ request, terms }: PreparedColumn, steel: Steel):
       'Braces are taken as rigid and as holding translation only; each must have the strength and stiffness of AISC 360 Appendix 6.',
     )
   }
-  said.push('The load acts along the axis of the column, and the column stands in simple framing.')
+  if (prepared.bending === undefined)
+    said.push('The load acts along the axis of the column, in simple framing.')
+  else said.push('Moments are first-order ones at the head; Appendix 8 amplifies them, and Cb is 1.')
   return said
 }
 
@@ -60,6 +63,11 @@ export function warningsOf(
   if (uplift > 0 && most > ADVISED_TENSION_SLENDERNESS) {
     warnings.push(`In uplift Lc/r is more than the ${ADVISED_TENSION_SLENDERNESS} that D1 advises.`)
   }
+  if (prepared.bending && fixedAtFoot(prepared)) {
+    warnings.push(
+      'A fixed foot under a load off the axis takes a moment: base plate and rods are not designed for it here.',
+    )
+  }
   for (const axis of ['strong', 'weak'] as const) {
     const free = lengths[axis].segments.some(({ k }) => k === null)
     if (free && lengths[axis].governedBy === 'eigenvalue' && !prepared.request.lengths) {
@@ -71,10 +79,14 @@ export function warningsOf(
   return warnings
 }
 
+function fixedAtFoot({ request: { ends } }: PreparedColumn): boolean {
+  return ends?.strong.bottom === 'fixed' || ends?.weak.bottom === 'fixed'
+}
+
 /** What no result here answers for. */
 export function notCoveredOf(): string[] {
   return [
-    'Bending: loads off the axis, end moments, and moments from beams or sway of the frame.',
+    'Moments from sway of the frame, loads across the column, and shear.',
     'The strength and stiffness of the braces, of the ends, and of what they are fixed to.',
     'Concrete breakout, pull-out and shear at the anchor rods; the footing or pier.',
     'Connections other than base and cap plate, holes in the shaft, fire, fatigue, corrosion.',

@@ -2,7 +2,7 @@ import { solveColumn, type ColumnSolution } from '../stability/column-lengths.ts
 import type { LengthSolution } from '../stability/effective-length.ts'
 import type { Column } from '../stability/column.ts'
 import { Refusal } from '../units/refusal.ts'
-import { combine, extremes, type Combination, type Extremes } from './asce7/combine.ts'
+import { combine, extremes, valueWith, type Combination, type Extremes } from './asce7/combine.ts'
 import { completeLoads } from './asce7/loads.ts'
 import { selfWeight } from './asce7/self-weight.ts'
 import type { AiscTerms, ColumnRequest, LengthsGiven, RequiredStrength } from './column-request.ts'
@@ -18,8 +18,43 @@ export interface PreparedColumn {
   /** Offsets of weak-axis braces that do not stop twist, mm, each once. */
   braceOffsets: number[]
   combinations: [Combination, ...Combination[]]
+  /** How the load bends the column; undefined where it acts along the axis. */
+  bending: Bending | undefined
   /** Height whose weight is added to the dead load, mm; 0: none. */
   weighedHeight: number
+}
+
+/** Moments of a load off the axis, and end moments as given: about each axis, mm and N·mm. */
+export interface Bending {
+  offset: { strong: number; weak: number }
+  moment: { strong: number; weak: number }
+  /** M1/M2, positive in reverse curvature. */
+  ratio: { strong: number; weak: number }
+}
+
+/**
+ * M1/M2 that was not given: 0 where the far end is held and unmoved, −1 (the whole height bent alike) where an end can
+ * move sideways.
+ */
+function usualRatio({ ends }: ColumnRequest, axis: 'strong' | 'weak'): number {
+  const about = ends?.[axis]
+  const sways = about && [about.top, about.bottom].some((end) => end === 'free' || end === 'guided')
+  return sways ? -1 : 0
+}
+
+/** Undefined where nothing bends. */
+function bendingOf(request: ColumnRequest): Bending | undefined {
+  const { offset, required } = request
+  const bending: Bending = {
+    offset: { strong: Math.abs(offset?.strong ?? 0), weak: Math.abs(offset?.weak ?? 0) },
+    moment: { strong: Math.abs(required?.momentStrong ?? 0), weak: Math.abs(required?.momentWeak ?? 0) },
+    ratio: {
+      strong: required?.momentRatioStrong ?? usualRatio(request, 'strong'),
+      weak: required?.momentRatioWeak ?? usualRatio(request, 'weak'),
+    },
+  }
+  const all = [...Object.values(bending.offset), ...Object.values(bending.moment)]
+  return all.some((one) => one > 0) ? bending : undefined
 }
 
 function given(length: number): LengthSolution {
@@ -75,6 +110,7 @@ export function prepareColumn(request: ColumnRequest): PreparedColumn {
     solution,
     braceOffsets: offsetsOf(request),
     combinations: combinationsOf(request, terms),
+    bending: bendingOf(request),
     weighedHeight: weighed ? (request.height ?? 0) : 0,
   }
 }
@@ -82,4 +118,30 @@ export function prepareColumn(request: ColumnRequest): PreparedColumn {
 /** Governing compression and worst uplift of a column of a shape of this mass, kg/m. */
 export function demandOf(prepared: PreparedColumn, massPerMetre: number): Extremes {
   return extremes(prepared.combinations, selfWeight(massPerMetre, prepared.weighedHeight))
+}
+
+/** What one combination asks of a column: N, compression positive; first-order moments, N·mm. */
+export interface Demand {
+  combination: Combination
+  axial: number
+  momentStrong: number
+  momentWeak: number
+}
+
+/** Every combination with its moments: the load off the axis bends, the column's own weight does not. */
+export function demandsOf(
+  { combinations, weighedHeight }: PreparedColumn,
+  { offset, moment }: Bending,
+  massPerMetre: number,
+): Demand[] {
+  const weight = selfWeight(massPerMetre, weighedHeight)
+  return combinations.map((combination) => {
+    const applied = Math.abs(combination.value)
+    return {
+      combination,
+      axial: valueWith(combination, weight),
+      momentStrong: applied * offset.strong + moment.strong,
+      momentWeak: applied * offset.weak + moment.weak,
+    }
+  })
 }

@@ -10,6 +10,7 @@ import { available, FACTORS } from './aisc360/resistance.ts'
 import { slenderness } from './aisc360/slenderness.ts'
 import { availableTension } from './aisc360/tension.ts'
 import { demandOf, type PreparedColumn } from './prepare-column.ts'
+import { screenBending, type BentScreening } from './screen-bending.ts'
 
 /** What a shape can carry as this column, on numbers alone. N. */
 export interface Screening {
@@ -21,6 +22,8 @@ export interface Screening {
   utilisation: number
   /** The larger Lc/r. */
   slenderness: number
+  /** Where the column is bent as well. */
+  bent: BentScreening | undefined
 }
 
 export function compressionInput(prepared: PreparedColumn, Fy: number): CompressionInput {
@@ -51,12 +54,16 @@ export function screenColumn(
   const capacity = available(nominal, FACTORS.compression, method)
   const tension = availableTension(steel.Fy, steel.Fu, section.area, method)
   const { compression, uplift } = demandOf(prepared, section.mass)
+  const { bending } = prepared
+  const bent =
+    bending && screenBending(prepared, bending, section, steel.Fy, { compression: capacity, tension })
   return {
     capacity,
     tension,
     compression,
     uplift,
-    utilisation: Math.max(compression / capacity, uplift / tension),
+    utilisation: Math.max(compression / capacity, uplift / tension, bent?.utilisation ?? 0),
     slenderness: Math.max(slenderness(input.strong, section.rx), slenderness(input.weak, section.ry)),
+    bent,
   }
 }

@@ -6,6 +6,9 @@ import type { AiscTerms, ColumnRequest, RequiredStrength } from './column-reques
 
 /** Largest effective length that can be given outright, mm: twice the tallest column. */
 const MAX_LENGTH = 2 * MAX_HEIGHT
+/** N·mm and mm: beyond these it is no column in simple framing. */
+const LARGEST_MOMENT = 1e11
+const LARGEST_OFFSET = 2000
 const NOT_OFFERED = 'not yet offered; give 0 or ask the shop'
 
 export function termsOf(request: ColumnRequest): AiscTerms | Issue[] {
@@ -92,8 +95,16 @@ function requiredIssues(required: RequiredStrength): Issue[] {
     issues.push({ path: 'required.axial', message })
   }
   for (const name of ['momentStrong', 'momentWeak'] as const) {
-    if ((required[name] ?? 0) === 0) continue
-    issues.push({ path: `required.${name}`, message: `an end moment is ${NOT_OFFERED}` })
+    const moment = required[name] ?? 0
+    if (Number.isFinite(moment) && Math.abs(moment) <= LARGEST_MOMENT) continue
+    const message = 'an end moment is a number of N·mm, at most 100 000 kN·m either way'
+    issues.push({ path: `required.${name}`, message })
+  }
+  for (const name of ['momentRatioStrong', 'momentRatioWeak'] as const) {
+    const ratio = required[name] ?? 0
+    if (ratio >= -1 && ratio <= 1) continue
+    const message = 'M1/M2 is from −1 (single curvature) to 1 (reverse curvature)'
+    issues.push({ path: `required.${name}`, message })
   }
   return issues
 }
@@ -101,8 +112,8 @@ function requiredIssues(required: RequiredStrength): Issue[] {
 function demandIssues({ loads, required, offset }: ColumnRequest): Issue[] {
   const issues: Issue[] = []
   for (const axis of ['strong', 'weak'] as const) {
-    if ((offset?.[axis] ?? 0) === 0) continue
-    issues.push({ path: `offset.${axis}`, message: `a load off the axis of the column is ${NOT_OFFERED}` })
+    if (Math.abs(offset?.[axis] ?? 0) <= LARGEST_OFFSET) continue
+    issues.push({ path: `offset.${axis}`, message: 'an offset is at most 2 000 mm either way' })
   }
   if (loads && required) {
     const message = 'give loads by case or a required strength, not both'

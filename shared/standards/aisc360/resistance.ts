@@ -13,6 +13,7 @@ export interface Factors {
  */
 export const FACTORS = {
   compression: { phi: 0.9, omega: 1.67 },
+  flexure: { phi: 0.9, omega: 1.67 },
   tensionYield: { phi: 0.9, omega: 1.67 },
   tensionRupture: { phi: 0.75, omega: 2 },
   plateBending: { phi: 0.9, omega: 1.67 },
