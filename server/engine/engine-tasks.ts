@@ -4,7 +4,7 @@ import type { BodyOf } from '../../shared/contracts/operations.ts'
 import type { ProposalAnswerDto } from '../../shared/contracts/proposals.ts'
 import type { RequestDto } from '../../shared/contracts/requests.ts'
 import type { LineRequirement } from '../../shared/contracts/requirement.ts'
-import { steelOf } from '../../shared/materials/shape-steels.ts'
+import { steelFor } from '../../shared/materials/steel-for.ts'
 import type { PriceBook } from '../../shared/pricing/price-book.ts'
 import { propose } from '../../shared/proposal/propose.ts'
 import type { Section } from '../../shared/sections/section.ts'
@@ -23,7 +23,7 @@ function sectionOf(name: string): Section {
 
 function check({ section: name, ...request }: BodyOf<'checkColumn'>) {
   const section = sectionOf(name)
-  return checkColumn(prepareColumn(request), section, steelOf(request.grade, section.family))
+  return checkColumn(prepareColumn(request), section, steelFor(request.grade, section))
 }
 
 function basePlate({ body, book }: { body: BodyOf<'designBasePlate'>; book: PriceBook }) {

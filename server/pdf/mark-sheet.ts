@@ -80,7 +80,7 @@ function columnDrawing(line: QuoteLineDto, system: UnitSystem): ColumnDrawing | 
   const { height, ends, braces } = line.requirement
   if (height === undefined || !ends) return undefined
   const { strong, weak } = line.check.lengths
-  const { required = 0 } = line.check.values
+  const required = Number(line.check.values.required ?? 0)
   return {
     height,
     ends,

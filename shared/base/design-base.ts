@@ -4,6 +4,7 @@ import { Refusal, type Issue } from '../units/refusal.ts'
 import type { BaseDesign, BaseInput, BaseParts } from './base-design.ts'
 import { compressionChecks } from './compression-checks.ts'
 import { leastLeg } from './fillet.ts'
+import { enPlateChecks } from './en-plate.ts'
 import { findBase, wallOf } from './find-base.ts'
 import { rodChecks } from './rod-checks.ts'
 import { FEWEST_RODS, POST_WEIGHT } from './rods.ts'
@@ -13,10 +14,9 @@ const NOT_COVERED =
   'Concrete breakout, pull-out and shear at the anchor rods, and the footing itself, are not covered here: the engineer of record designs them.'
 
 /** Everything that cannot be taken, each with its field. */
-function issuesOf({ standard, section, required, concrete, plate, rods, stock }: BaseInput): Issue[] {
+function issuesOf({ section, required, concrete, plate, rods, stock }: BaseInput): Issue[] {
   const issues: Issue[] = []
   const say = (path: string, message: string) => issues.push({ path, message })
-  if (standard === 'EN 1993-1-1') say('standard', 'base plates by EN 1993-1-8 are not offered yet')
   if (!(required.compression >= 0)) say('required.compression', 'newtons, 0 or more')
   if (!(required.uplift >= 0)) say('required.uplift', 'newtons, 0 or more; uplift is positive here')
   if (required.compression === 0 && required.uplift === 0) say('required', 'compression or uplift above 0')
@@ -41,8 +41,10 @@ function issuesOf({ standard, section, required, concrete, plate, rods, stock }:
   return issues
 }
 
-function notesOf(parts: BaseParts, { section, required, weight }: BaseInput): string[] {
+function notesOf(parts: BaseParts, { standard, section, required, weight }: BaseInput): string[] {
   const notes = [NOT_COVERED]
+  if (standard === 'EN 1993-1-1')
+    notes.push('Anchor rods and weld are checked by AISC 360, LRFD, whose margins are those of EN 1993-1-8.')
   if (required.compression > 0) {
     notes.push(
       'Compression goes into the plate by bearing of the sawn end of the shaft; the weld holds it in place.',
@@ -67,14 +69,15 @@ function notesOf(parts: BaseParts, { section, required, weight }: BaseInput): st
 
 /**
  * Base plate, anchor rods and weld of a column in simple framing: bearing J8, plate by Design Guide 1, four rods and the
- * erection load of 29 CFR 1926.755, fillet J2. What is given is checked, the rest is found. Refuses by field.
+ * erection load of 29 CFR 1926.755, fillet J2; under EN the plate by EN 1993-1-8 6.2.5. What is given is checked, the rest is found. Refuses by field.
  */
 export function designBase(input: BaseInput): BaseDesign {
   const issues = issuesOf(input)
   if (issues.length > 0) throw new Refusal(issues)
   const method: Method = input.method ?? 'LRFD'
   const parts = findBase(input, method)
-  const compression = compressionChecks(input, parts, method)
+  const compression =
+    input.standard === 'EN 1993-1-1' ? enPlateChecks(input, parts) : compressionChecks(input, parts, method)
   const rods = rodChecks(input, parts, method)
   const welds = weldChecks(input, parts, method)
   const checks = [...compression.checks, ...rods.checks, ...welds.checks]

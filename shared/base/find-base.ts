@@ -4,6 +4,7 @@ import type { Method } from '../standards/aisc360/resistance.ts'
 import type { BaseInput, BaseParts, Plate, PlateSize } from './base-design.ts'
 import { availableBearing, confinement } from './bearing.ts'
 import { cantilevers, thicknessRequired, upliftThickness } from './cantilever.ts'
+import { plateResistance } from './en-plate.ts'
 import { filletAvailable, leastLeg } from './fillet.ts'
 import { layOutRods, leastPlate, PLATE_MODULE, upToModule } from './rod-layout.ts'
 import { erectionMoment, erectionTension, FEWEST_RODS, rodAvailable, rodRoom } from './rods.ts'
@@ -45,13 +46,7 @@ function findPlan(input: BaseInput, least: PlateSize, method: Method): PlateSize
   const most = concrete.pier ?? { length: LARGEST, width: LARGEST }
   let length = plate.length ?? Math.min(upToModule(least.length), downToModule(most.length))
   let width = plate.width ?? Math.min(upToModule(least.width), downToModule(most.width))
-  const bears = () =>
-    availableBearing(
-      concrete.strength,
-      length * width,
-      confinement({ length, width }, concrete.pier),
-      method,
-    ) >= required.compression
+  const bears = () => bearingOf(input, { length, width }, method) >= required.compression
   while (!bears()) {
     const longer = plate.length === undefined && length + PLATE_MODULE <= most.length
     const wider = plate.width === undefined && width + PLATE_MODULE <= most.width
@@ -66,21 +61,38 @@ function downToModule(length: number): number {
   return Math.max(PLATE_MODULE, Math.floor(length / PLATE_MODULE) * PLATE_MODULE)
 }
 
+/** A plate grows until it bears with no more than this thickness, by EN, where the two go together; mm. */
+const USUAL_THICKNESS = 40
+
+/** What the concrete under a plate of this plan can take, N. */
+function bearingOf(input: BaseInput, plan: PlateSize, method: Method): number {
+  const { section, concrete, plate, stock } = input
+  if (input.standard === 'EN 1993-1-1') {
+    const usual = stock.thicknesses.findLast((one) => one <= USUAL_THICKNESS) ?? USUAL_THICKNESS
+    return plateResistance(
+      section,
+      plate?.thickness ?? usual,
+      plate?.yield ?? PLATE_YIELD,
+      concrete.strength,
+      plan,
+    )
+  }
+  const confined = confinement(plan, concrete.pier)
+  return availableBearing(concrete.strength, plan.length * plan.width, confined, method)
+}
+
 /** Up the list of what is stocked; the thickest where none does. */
 function findThickness(input: BaseInput, plan: PlateSize, Fy: number, count: number, method: Method): number {
-  const { section, concrete, required, stock } = input
-  const bearing = availableBearing(
-    concrete.strength,
-    plan.length * plan.width,
-    confinement(plan, concrete.pier),
-    method,
-  )
-  const { l } = cantilevers(section, plan, required.compression / bearing)
-  const needed = Math.max(
-    thicknessRequired(l, required.compression, Fy, plan, method),
-    upliftThickness(required.uplift / count, Fy, method),
-  )
-  return stock.thicknesses.find((thickness) => thickness >= needed) ?? stock.thicknesses.at(-1) ?? 25
+  const { section, required, stock, concrete } = input
+  const pulled = upliftThickness(required.uplift / count, Fy, method)
+  const { l } = cantilevers(section, plan, required.compression / bearingOf(input, plan, method))
+  const needed = thicknessRequired(l, required.compression, Fy, plan, method)
+  const bears = (thickness: number) =>
+    input.standard === 'EN 1993-1-1'
+      ? plateResistance(section, thickness, Fy, concrete.strength, plan) >= required.compression
+      : thickness >= needed
+  const found = stock.thicknesses.find((thickness) => thickness >= pulled && bears(thickness))
+  return found ?? stock.thicknesses.at(-1) ?? 25
 }
 
 /** Everything that was not given, found; what was given, as it is. */

@@ -46,7 +46,19 @@ export const columnCheck = z.object({
     weak: effectiveLength,
     torsion: z.object({ used: z.number() }),
   }),
-  values: z.record(z.string(), z.number()),
+  /** What each brace must give: AISC 360 Appendix 6.2. */
+  braces: z
+    .array(
+      z.object({
+        height: z.number(),
+        axis: z.enum(['strong', 'weak']),
+        length: z.number(),
+        strength: z.number(),
+        stiffness: z.number(),
+      }),
+    )
+    .default([]),
+  values: z.record(z.string(), z.union([z.number(), z.string()])),
   checks: z.array(check),
   assumptions: z.array(z.string()),
   warnings: z.array(z.string()),

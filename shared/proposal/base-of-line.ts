@@ -16,7 +16,7 @@ type Given = Pick<BaseInput, 'plate' | 'rods'>
 
 /** The base of a line: what is given is checked, the rest found from what the shop stocks. */
 export function baseOfLine(
-  asked: Pick<LineAsked, 'base' | 'method' | 'height'>,
+  asked: Pick<LineAsked, 'base' | 'standard' | 'method' | 'height'>,
   book: PriceBook,
   section: Section,
   { compression, uplift }: FootLoads,
@@ -24,6 +24,7 @@ export function baseOfLine(
 ): BaseDesign {
   const method: Method = asked.method ?? 'LRFD'
   return designBase({
+    standard: asked.standard,
     method,
     section,
     required: { compression, uplift },

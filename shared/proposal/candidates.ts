@@ -1,14 +1,14 @@
-import { steelOf } from '../materials/shape-steels.ts'
-import type { Steel } from '../materials/steel.ts'
+import { steelFor } from '../materials/steel-for.ts'
+import { E_AISC, type Steel } from '../materials/steel.ts'
 import { barPriceOf, type PriceBook } from '../pricing/price-book.ts'
-import { OFFERED_FAMILIES, type Catalogue } from '../sections/catalogue.ts'
 import type { Family, Section } from '../sections/section.ts'
 import type { PreparedColumn } from '../standards/prepare-column.ts'
 import { roundRange } from '../standards/aisc360/effective-area.ts'
 import { boxLimits } from '../standards/aisc360/flexure-hss.ts'
 import { webFlexureLimit } from '../standards/aisc360/flexure-i.ts'
+import { classOf } from '../standards/en1993/classification.ts'
+import { familiesOf } from '../standards/families.ts'
 import { screenColumn, type Screening } from '../standards/screen-column.ts'
-import { E_AISC } from '../materials/steel.ts'
 import { Refusal } from '../units/refusal.ts'
 import type { Limits, LineAsked } from './line-asked.ts'
 
@@ -20,42 +20,54 @@ export interface Candidate {
 
 export type LimitName = 'depth' | 'width' | 'utilisation' | 'slenderness'
 
-/** Families that are asked for, checked by a standard that is offered, and bought by the shop. */
-export function familiesFor({ limits }: Pick<LineAsked, 'limits'>, book: PriceBook): Family[] {
-  const asked = limits.families && limits.families.length > 0 ? limits.families : OFFERED_FAMILIES
-  return asked.filter((family) => OFFERED_FAMILIES.includes(family) && barPriceOf(book, family))
+/** Families that are asked for, that the standard is for, and that the shop buys. */
+export function familiesFor(
+  { limits, standard = 'AISC 360-22' }: Pick<LineAsked, 'limits' | 'standard'>,
+  book: PriceBook,
+): Family[] {
+  const known = familiesOf(standard)
+  const asked = limits.families && limits.families.length > 0 ? limits.families : known
+  return asked.filter((family) => known.includes(family) && barPriceOf(book, family))
 }
 
-/** The steel of each family, where what was asked is made of it. Refuses a grade that none of them is made of. */
-export function steelsOf(families: readonly Family[], grade: LineAsked['grade']): Map<Family, Steel> {
-  const steels = new Map<Family, Steel>()
-  let fault: Refusal | undefined
-  for (const family of families) {
+/** The steel of each shape, where what was asked is made of it. Refuses a grade that none of them is made of. */
+function steelsOf(sections: readonly Section[], grade: LineAsked['grade']): Map<Section, Steel> {
+  const steels = new Map<Section, Steel>()
+  // US steels are a family's; a fault of one shape of it is a fault of all.
+  const faults = new Map<Family, Refusal>()
+  for (const section of sections) {
+    if (faults.has(section.family)) continue
     try {
-      steels.set(family, steelOf(grade, family))
+      steels.set(section, steelFor(grade, section))
     } catch (error) {
       if (!(error instanceof Refusal)) throw error
-      fault = error
+      if (error.issues.some(({ path }) => path.startsWith('grade'))) faults.set(section.family, error)
     }
   }
+  const [fault] = faults.values()
   if (steels.size === 0 && fault) throw fault
   return steels
 }
 
-/** Every shape of these families on numbers alone. Round shapes beyond the range of E7.2 have no strength there. */
-export function screenCatalogue(
+/** Every shape of these on numbers alone, but those that a standard has no strength for. */
+export function screenSections(
   prepared: PreparedColumn,
-  catalogue: Catalogue,
-  steels: ReadonlyMap<Family, Steel>,
+  sections: readonly Section[],
+  grade: LineAsked['grade'],
 ): Candidate[] {
-  return catalogue.ofFamilies([...steels.keys()]).flatMap((section) => {
-    const steel = steels.get(section.family)
-    if (!steel || (section.shape === 'round' && section.diameterRatio >= roundRange(E_AISC, steel.Fy))) {
-      return []
-    }
-    if (prepared.bending && !coversFlexure(section, steel.Fy)) return []
+  const steels = steelsOf(sections, grade)
+  return sections.flatMap((section) => {
+    const steel = steels.get(section)
+    if (!steel || !isCovered(prepared, section, steel.Fy)) return []
     return [{ section, steel, screening: screenColumn(prepared, section, steel) }]
   })
+}
+
+/** Whether the clauses that are here cover a shape: E7.2 and chapter F, or round shapes below class 4. */
+function isCovered({ terms, bending }: PreparedColumn, section: Section, Fy: number): boolean {
+  if (terms.standard === 'EN 1993-1-1') return section.shape !== 'round' || classOf(section, Fy) < 4
+  if (section.shape === 'round' && section.diameterRatio >= roundRange(E_AISC, Fy)) return false
+  return bending === undefined || coversFlexure(section, Fy)
 }
 
 /** Chapter F as far as it is here: webs that are compact (I) or not slender (HSS). */

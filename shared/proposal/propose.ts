@@ -8,10 +8,11 @@ import type { Catalogue } from '../sections/catalogue.ts'
 import { outlineOf, type Rings } from '../sections/outline.ts'
 import type { Section } from '../sections/section.ts'
 import { checkColumn, type ColumnCheck } from '../standards/check-column.ts'
+import { checkFamily } from '../standards/families.ts'
 import { prepareColumn, type PreparedColumn } from '../standards/prepare-column.ts'
 import { Refusal, refuse, type Issue } from '../units/refusal.ts'
 import { baseOfLine } from './base-of-line.ts'
-import { familiesFor, limitsBroken, screenCatalogue, steelsOf, type Candidate } from './candidates.ts'
+import { familiesFor, limitsBroken, screenSections, type Candidate } from './candidates.ts'
 import type { LineAsked } from './line-asked.ts'
 import { nextLighter, type NextLighter } from './next-lighter.ts'
 import { nothingFits, type NoProposal } from './nothing-fits.ts'
@@ -80,7 +81,7 @@ export function propose(input: ProposalInput): Proposal | NoProposal {
   const prepared = prepareColumn(asked)
   const families = familiesFor(asked, book)
   if (families.length === 0) refuse('limits.families', 'at least one family that the shop buys')
-  const screened = screenCatalogue(prepared, catalogue, steelsOf(families, asked.grade))
+  const screened = screenSections(prepared, catalogue.ofFamilies(families), asked.grade)
   const holding = screened.filter((candidate) => limitsBroken(candidate, asked.limits).length === 0)
   const terms = { book, delivery }
   const ranked = rank(asked, holding, terms)
@@ -155,10 +156,13 @@ function chooseByName(
 ): Chosen {
   const section = catalogue.find(name)
   if (!section) return refuse('section', `${name} is not in the catalogue; a designation such as W10X49`)
-  const steels = steelsOf([section.family], asked.grade)
-  const [candidate] = screenCatalogue(prepared, { ...catalogue, ofFamilies: () => [section] }, steels)
+  checkFamily(section, prepared.terms.standard)
+  const [candidate] = screenSections(prepared, [section], asked.grade)
   if (!candidate)
-    return refuse('section', `${section.designation} has no strength by AISC 360 E7.2; choose a thicker wall`)
+    return refuse(
+      'section',
+      `${section.designation} is too slender for the clauses that are here; choose a thicker wall`,
+    )
   const priced = priceOne(asked, candidate, terms)
   if (priced) return priced
   const base = asked.base.plate ? baseOfLine(asked, book, section, candidate.screening) : null

@@ -1,5 +1,5 @@
 import type { BaseDesign } from '../base/base-design.ts'
-import { steelOf } from '../materials/shape-steels.ts'
+import { steelFor } from '../materials/steel-for.ts'
 import type { LineSpec } from '../pricing/line-spec.ts'
 import type { PriceBook } from '../pricing/price-book.ts'
 import type { Section } from '../sections/section.ts'
@@ -19,7 +19,7 @@ export function workOutLine(
   book: PriceBook,
 ): { check: ColumnCheck; base: BaseDesign | null } {
   const prepared = prepareColumn({ ...asked, height: spec.height })
-  const check = checkColumn(prepared, section, steelOf(spec.grade, section.family))
+  const check = checkColumn(prepared, section, steelFor(spec.grade, section))
   const { compression, uplift } = demandOf(prepared, section.mass)
   const { base: plate, rods } = spec
   if (!plate) return { check, base: null }

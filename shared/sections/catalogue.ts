@@ -1,7 +1,8 @@
 import type { Family, Section } from './section.ts'
 
-/** Families on offer now; the European ones are in the tables and wait for the checks of EN 1993-1-1. */
-export const OFFERED_FAMILIES: readonly Family[] = ['W', 'HSS_SQUARE', 'HSS_RECT', 'HSS_ROUND', 'PIPE']
+/** Families whose shapes are checked by AISC 360, and by EN 1993-1-1. */
+export const US_FAMILIES: readonly Family[] = ['W', 'HSS_SQUARE', 'HSS_RECT', 'HSS_ROUND', 'PIPE']
+export const EU_FAMILIES: readonly Family[] = ['HEA', 'HEB', 'HEM', 'IPE', 'UC', 'UB', 'SHS', 'RHS', 'CHS']
 
 export interface Catalogue {
   readonly sections: readonly Section[]

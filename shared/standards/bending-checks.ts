@@ -6,6 +6,8 @@ import { flexureCheck } from './aisc360/flexure-check.ts'
 import type { Axis } from './aisc360/flexure-hss.ts'
 import { INTERACTION_TURN } from './aisc360/interaction.ts'
 import { equivalentMoment, secondOrderFactor } from './aisc360/second-order.ts'
+import type { Method } from './aisc360/resistance.ts'
+import type { AiscTerms } from './column-request.ts'
 import type { Bending, PreparedColumn } from './prepare-column.ts'
 import type { Screening } from './screen-column.ts'
 import type { BentScreening } from './screen-bending.ts'
@@ -17,13 +19,14 @@ const bend = (value: number): Quantity => ({ value, unit: 'N·mm' })
 /** Appendix 8, chapter F about each axis that is bent, and H1, under the combination that works the column hardest. */
 export function bendingChecks(
   prepared: PreparedColumn,
+  aisc: AiscTerms,
   bending: Bending,
   section: Section,
   Fy: number,
   bent: BentScreening,
   { capacity, tension }: Screening,
 ): Check[] {
-  const { method, standard } = prepared.terms
+  const { method, standard } = aisc
   const terms = { E: E_AISC, Fy, Lb: prepared.solution.torsion.used, edition: standard }
   const { momentStrong, momentWeak } = bent.demand
   const strong = (bent.amplifierStrong ?? 1) * momentStrong
@@ -31,11 +34,17 @@ export function bendingChecks(
   const checks: Check[] = []
   if (momentStrong > 0) {
     const check = flexureCheck(section, 'strong', terms, method, strong)
-    checks.push({ ...check, steps: [...amplifiedSteps('strong', prepared, bending, bent), ...check.steps] })
+    checks.push({
+      ...check,
+      steps: [...amplifiedSteps('strong', prepared, method, bending, bent), ...check.steps],
+    })
   }
   if (momentWeak > 0) {
     const check = flexureCheck(section, 'weak', terms, method, weak)
-    checks.push({ ...check, steps: [...amplifiedSteps('weak', prepared, bending, bent), ...check.steps] })
+    checks.push({
+      ...check,
+      steps: [...amplifiedSteps('weak', prepared, method, bending, bent), ...check.steps],
+    })
   }
   const { axial } = bent.demand
   const p = axial >= 0 ? axial / capacity : -axial / tension
@@ -45,7 +54,8 @@ export function bendingChecks(
 
 function amplifiedSteps(
   axis: Axis,
-  { terms, request }: PreparedColumn,
+  { request }: PreparedColumn,
+  method: Method,
   { offset, ratio }: Bending,
   bent: BentScreening,
 ): Step[] {
@@ -55,7 +65,7 @@ function amplifiedSteps(
   const B1 = strong ? bent.amplifierStrong : bent.amplifierWeak
   const Pe1 = strong ? bent.elasticStrong : bent.elasticWeak
   const name = strong ? 'x' : 'y'
-  const alpha = secondOrderFactor(terms.method)
+  const alpha = secondOrderFactor(method)
   const off = offset[axis]
   const steps: Step[] = [
     makeStep({

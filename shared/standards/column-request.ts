@@ -1,9 +1,10 @@
 import type { Brace, EndFixity, Ends } from '../stability/column.ts'
 import type { Method } from './aisc360/resistance.ts'
 import type { LoadsAsked } from './asce7/loads.ts'
+import type { EnRule, ImposedCategory } from './en1990/combinations.ts'
 
 export type Standard = 'AISC 360-22' | 'AISC 360-16' | 'EN 1993-1-1'
-export type CombinationRule = 'ASCE 7-22' | 'ASCE 7-16' | 'EN 1990 6.10' | 'EN 1990 6.10ab'
+export type CombinationRule = 'ASCE 7-22' | 'ASCE 7-16' | EnRule
 
 /** Strengths already combined: N (compression positive) and N·mm. */
 export interface RequiredStrength {
@@ -42,7 +43,7 @@ export interface ColumnRequest {
   /** f1 of ASCE 7. */
   liveFactor?: number | undefined
   /** Category of imposed load, EN 1990 only. */
-  liveCategory?: string | undefined
+  liveCategory?: ImposedCategory | undefined
   /** Offset of the load from the axis of the column, mm. */
   offset?: { strong?: number | undefined; weak?: number | undefined } | undefined
   selfWeight?: boolean | undefined
@@ -56,3 +57,12 @@ export interface AiscTerms {
   combinations: 'ASCE 7-22' | 'ASCE 7-16'
   liveFactor: number
 }
+
+/** For those of EN 1993-1-1. */
+export interface EnTerms {
+  standard: 'EN 1993-1-1'
+  combinations: EnRule
+  liveCategory: ImposedCategory
+}
+
+export type Terms = AiscTerms | EnTerms

@@ -12,18 +12,28 @@ import type { PreparedColumn } from './prepare-column.ts'
 /** What was taken where the customer did not say, and what every check here rests on. */
 export function assumptionsOf(prepared: PreparedColumn, steel: Steel): string[] {
   const { request, terms } = prepared
-  const { standard, method, combinations, liveFactor } = terms
   const said: string[] = []
-  if (request.standard === undefined || request.method === undefined) {
-    said.push(`Checked by ${standard}, ${method}.`)
-  }
-  if (request.loads && request.combinations === undefined) {
-    said.push(`Loads are combined by ${combinations}, every sign of wind and earthquake.`)
-  }
-  if (request.loads?.live && request.liveFactor === undefined) {
-    said.push(
-      `Live load beside other loads counts at f1 = ${liveFactor}; say so for garages, assembly or more than 100 psf.`,
-    )
+  if (terms.standard === 'EN 1993-1-1') {
+    said.push('Checked by EN 1993-1-1 with γM0 = γM1 = 1.0; a national annex may choose otherwise.')
+    if (request.loads && request.combinations === undefined) {
+      said.push(`Loads are combined by ${terms.combinations}, every variable action leading in turn.`)
+    }
+    if (request.loads?.live && request.liveCategory === undefined) {
+      said.push('Imposed load is of category B, offices: ψ0 = 0.7.')
+    }
+  } else {
+    const { standard, method, combinations, liveFactor } = terms
+    if (request.standard === undefined || request.method === undefined) {
+      said.push(`Checked by ${standard}, ${method}.`)
+    }
+    if (request.loads && request.combinations === undefined) {
+      said.push(`Loads are combined by ${combinations}, every sign of wind and earthquake.`)
+    }
+    if (request.loads?.live && request.liveFactor === undefined) {
+      said.push(
+        `Live load beside other loads counts at f1 = ${liveFactor}; say so for garages, assembly or more than 100 psf.`,
+      )
+    }
   }
   if (request.grade === undefined) said.push(`Steel is ${steel.title}.`)
   if (request.required) said.push('The required strength is taken as already combined, own weight included.')

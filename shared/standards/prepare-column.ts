@@ -5,13 +5,14 @@ import { Refusal } from '../units/refusal.ts'
 import { combine, extremes, valueWith, type Combination, type Extremes } from './asce7/combine.ts'
 import { completeLoads } from './asce7/loads.ts'
 import { selfWeight } from './asce7/self-weight.ts'
-import type { AiscTerms, ColumnRequest, LengthsGiven, RequiredStrength } from './column-request.ts'
+import type { ColumnRequest, LengthsGiven, RequiredStrength, Terms } from './column-request.ts'
+import { combineEn } from './en1990/combinations.ts'
 import { columnOf, requestIssues, termsOf } from './validate-request.ts'
 
 /** What of a request is the same for every shape: solved once, used for the whole catalogue. */
 export interface PreparedColumn {
   request: ColumnRequest
-  terms: AiscTerms
+  terms: Terms
   /** Undefined where effective lengths are given outright. */
   column: Column | undefined
   solution: ColumnSolution
@@ -85,10 +86,13 @@ function asRequired({ axial }: RequiredStrength): [Combination] {
   return [{ name: 'as given', factors: {}, loads: {}, value: axial }]
 }
 
-function combinationsOf(request: ColumnRequest, terms: AiscTerms): [Combination, ...Combination[]] {
+function combinationsOf(request: ColumnRequest, terms: Terms): [Combination, ...Combination[]] {
   if (request.required) return asRequired(request.required)
   const cases = completeLoads(request.loads ?? {})
-  const [first, ...rest] = combine(cases, terms.combinations, terms.method, terms.liveFactor)
+  const [first, ...rest] =
+    terms.standard === 'EN 1993-1-1'
+      ? combineEn(cases, terms.combinations, terms.liveCategory)
+      : combine(cases, terms.combinations, terms.method, terms.liveFactor)
   if (!first) throw new Error('a rule of combinations has no combination')
   return [first, ...rest]
 }

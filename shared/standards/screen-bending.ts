@@ -4,6 +4,7 @@ import { nominalFlexure } from './aisc360/flexure.ts'
 import { interaction } from './aisc360/interaction.ts'
 import { available, FACTORS } from './aisc360/resistance.ts'
 import { amplifier, elasticLoad, equivalentMoment } from './aisc360/second-order.ts'
+import type { AiscTerms } from './column-request.ts'
 import { demandsOf, type Bending, type Demand, type PreparedColumn } from './prepare-column.ts'
 
 /** A column that is bent as well, under the combination that works it hardest. N, N·mm. */
@@ -27,7 +28,8 @@ interface Axial {
 
 /** Available flexural strength about both axes, N·mm. */
 export function flexuralCapacity(
-  { terms, solution }: PreparedColumn,
+  { solution }: PreparedColumn,
+  terms: AiscTerms,
   section: Section,
   Fy: number,
 ): { strong: number; weak: number } {
@@ -40,13 +42,14 @@ export function flexuralCapacity(
 /** Appendix 8 and H1 over every combination. Refuses a shape that the clauses of chapter F do not cover. */
 export function screenBending(
   prepared: PreparedColumn,
+  terms: AiscTerms,
   bending: Bending,
   section: Section,
   Fy: number,
   axial: Axial,
 ): BentScreening {
-  const { terms, solution } = prepared
-  const capacity = flexuralCapacity(prepared, section, Fy)
+  const { solution } = prepared
+  const capacity = flexuralCapacity(prepared, terms, section, Fy)
   const elasticStrong = elasticLoad(E_AISC * section.Ix, solution.strong.used)
   const elasticWeak = elasticLoad(E_AISC * section.Iy, solution.weak.used)
   const Cm = { strong: equivalentMoment(bending.ratio.strong), weak: equivalentMoment(bending.ratio.weak) }

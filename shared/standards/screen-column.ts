@@ -9,6 +9,8 @@ import {
 import { available, FACTORS } from './aisc360/resistance.ts'
 import { slenderness } from './aisc360/slenderness.ts'
 import { availableTension } from './aisc360/tension.ts'
+import type { AiscTerms } from './column-request.ts'
+import { governingModeEn, modesEn, tensionEn, type LengthsEn } from './en1993/compression.ts'
 import { demandOf, type PreparedColumn } from './prepare-column.ts'
 import { screenBending, type BentScreening } from './screen-bending.ts'
 
@@ -40,30 +42,59 @@ export function compressionInput(prepared: PreparedColumn, Fy: number): Compress
 }
 
 /**
- * The clauses of `checkColumn` without their steps. Refuses a round shape beyond the range of E7.2.
+ * The clauses of `checkColumn` without their steps. Refuses a round shape beyond the range of AISC 360 E7.2, or of class 4
+ * by EN 1993-1-1.
  */
 export function screenColumn(
   prepared: PreparedColumn,
   section: Section,
   steel: Pick<Steel, 'Fy' | 'Fu'>,
 ): Screening {
-  const { method } = prepared.terms
+  const { terms } = prepared
+  return terms.standard === 'EN 1993-1-1'
+    ? screenEn(prepared, section, steel)
+    : screenAisc(prepared, terms, section, steel)
+}
+
+function screenAisc(
+  prepared: PreparedColumn,
+  terms: AiscTerms,
+  section: Section,
+  steel: Pick<Steel, 'Fy' | 'Fu'>,
+): Screening {
   const input = compressionInput(prepared, steel.Fy)
   const mode = governingMode(bucklingModes(section, input))
   const nominal = nominalCompression(section, mode, E_AISC, steel.Fy)
-  const capacity = available(nominal, FACTORS.compression, method)
-  const tension = availableTension(steel.Fy, steel.Fu, section.area, method)
+  const capacity = available(nominal, FACTORS.compression, terms.method)
+  const tension = availableTension(steel.Fy, steel.Fu, section.area, terms.method)
   const { compression, uplift } = demandOf(prepared, section.mass)
   const { bending } = prepared
   const bent =
-    bending && screenBending(prepared, bending, section, steel.Fy, { compression: capacity, tension })
+    bending && screenBending(prepared, terms, bending, section, steel.Fy, { compression: capacity, tension })
   return {
-    capacity,
-    tension,
-    compression,
-    uplift,
+    ...{ capacity, tension, compression, uplift, bent },
     utilisation: Math.max(compression / capacity, uplift / tension, bent?.utilisation ?? 0),
-    slenderness: Math.max(slenderness(input.strong, section.rx), slenderness(input.weak, section.ry)),
-    bent,
+    slenderness: slendernessOf(prepared, section),
   }
+}
+
+function screenEn(prepared: PreparedColumn, section: Section, { Fy }: Pick<Steel, 'Fy'>): Screening {
+  const capacity = governingModeEn(modesEn(section, Fy, lengthsOf(prepared))).resistance
+  const tension = tensionEn(section.area, Fy)
+  const { compression, uplift } = demandOf(prepared, section.mass)
+  return {
+    ...{ capacity, tension, compression, uplift, bent: undefined },
+    utilisation: Math.max(compression / capacity, uplift / tension),
+    slenderness: slendernessOf(prepared, section),
+  }
+}
+
+/** Effective lengths that count, mm. */
+export function lengthsOf({ solution }: PreparedColumn): LengthsEn {
+  return { strong: solution.strong.used, weak: solution.weak.used, torsion: solution.torsion.used }
+}
+
+function slendernessOf(prepared: PreparedColumn, section: Section): number {
+  const { strong, weak } = lengthsOf(prepared)
+  return Math.max(slenderness(strong, section.rx), slenderness(weak, section.ry))
 }

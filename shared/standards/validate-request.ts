@@ -2,7 +2,7 @@ import type { Column } from '../stability/column.ts'
 import { MAX_HEIGHT, validateColumn } from '../stability/validate-column.ts'
 import type { Issue } from '../units/refusal.ts'
 import { completeLoads, LARGEST_LOAD, loadIssues } from './asce7/loads.ts'
-import type { AiscTerms, ColumnRequest, RequiredStrength } from './column-request.ts'
+import type { AiscTerms, ColumnRequest, EnTerms, RequiredStrength, Terms } from './column-request.ts'
 
 /** Largest effective length that can be given outright, mm: twice the tallest column. */
 const MAX_LENGTH = 2 * MAX_HEIGHT
@@ -11,13 +11,22 @@ const LARGEST_MOMENT = 1e11
 const LARGEST_OFFSET = 2000
 const NOT_OFFERED = 'not yet offered; give 0 or ask the shop'
 
-export function termsOf(request: ColumnRequest): AiscTerms | Issue[] {
-  const { standard = 'AISC 360-22', method = 'LRFD', liveFactor = 0.5 } = request
-  if (standard === 'EN 1993-1-1') {
-    const message =
-      'checks of EN 1993-1-1 are not offered yet; choose AISC 360-22 or AISC 360-16, or ask the shop'
-    return [{ path: 'standard', message }]
+/** The standard's terms with their defaults, or what of them does not go together. */
+export function termsOf(request: ColumnRequest): Terms | Issue[] {
+  return request.standard === 'EN 1993-1-1' ? enTermsOf(request) : aiscTermsOf(request)
+}
+
+function enTermsOf({ combinations = 'EN 1990 6.10', liveCategory = 'B' }: ColumnRequest): EnTerms | Issue[] {
+  if (combinations === 'ASCE 7-22' || combinations === 'ASCE 7-16') {
+    const message = 'EN 1993-1-1 goes with the combinations of EN 1990'
+    return [{ path: 'combinations', message }]
   }
+  return { standard: 'EN 1993-1-1', combinations, liveCategory }
+}
+
+function aiscTermsOf(request: ColumnRequest): AiscTerms | Issue[] {
+  const { method = 'LRFD', liveFactor = 0.5 } = request
+  const standard = request.standard === 'AISC 360-16' ? 'AISC 360-16' : 'AISC 360-22'
   const combinations = request.combinations ?? (standard === 'AISC 360-22' ? 'ASCE 7-22' : 'ASCE 7-16')
   if (combinations === 'EN 1990 6.10' || combinations === 'EN 1990 6.10ab') {
     const message = `${standard} goes with the combinations of ASCE 7-22 or ASCE 7-16`
@@ -28,6 +37,31 @@ export function termsOf(request: ColumnRequest): AiscTerms | Issue[] {
     return [{ path: 'liveFactor', message }]
   }
   return { standard, method, combinations, liveFactor }
+}
+
+/** What the checks of EN 1993-1-1 have no rule for here: refused with its reason, never left out. */
+function europeanIssues(request: ColumnRequest): Issue[] {
+  if (request.standard !== 'EN 1993-1-1') return []
+  const issues: Issue[] = []
+  const say = (path: string, message: string) => issues.push({ path, message })
+  for (const axis of ['strong', 'weak'] as const) {
+    const message = `not offered by EN 1993-1-1 here: its interaction check is still wanting; give 0, or use AISC 360`
+    if (request.offset?.[axis]) say(`offset.${axis}`, `a load off the axis is ${message}`)
+    const name = axis === 'strong' ? 'momentStrong' : 'momentWeak'
+    if (request.required?.[name]) say(`required.${name}`, `an end moment is ${message}`)
+  }
+  const { rain, earthquake } = request.loads ?? {}
+  if (rain) say('loads.rain', 'EN 1990 has no action of rain: give it with the snow')
+  for (const name of ['pushes', 'lifts', 'vertical'] as const) {
+    if (earthquake?.[name])
+      say(`loads.earthquake.${name}`, 'seismic combinations of EN 1990 are not offered yet')
+  }
+  request.braces?.forEach(({ offset, stopsTwist }, index) => {
+    if (offset && !stopsTwist) {
+      say(`braces.${index}.offset`, 'EN 1993-1-1 has no rule for it here: stop twist at the brace, or give 0')
+    }
+  })
+  return issues
 }
 
 /** The geometry that is asked, when ends and height are. */
@@ -127,5 +161,10 @@ function demandIssues({ loads, required, offset }: ColumnRequest): Issue[] {
 /** Everything in a request that cannot be taken, each with its field and what would be right; none: it can. */
 export function requestIssues(request: ColumnRequest): Issue[] {
   const terms = termsOf(request)
-  return [...(Array.isArray(terms) ? terms : []), ...lengthIssues(request), ...demandIssues(request)]
+  return [
+    ...(Array.isArray(terms) ? terms : []),
+    ...lengthIssues(request),
+    ...demandIssues(request),
+    ...europeanIssues(request),
+  ]
 }

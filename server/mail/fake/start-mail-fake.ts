@@ -19,8 +19,12 @@ export async function startMailFake(config: Config, logger: Logger): Promise<Run
       const chunks: Buffer[] = []
       stream.on('data', (chunk: Buffer) => chunks.push(chunk))
       stream.on('end', () => {
-        store.keep(Buffer.concat(chunks))
-        callback()
+        try {
+          store.keep(Buffer.concat(chunks))
+          callback()
+        } catch (error) {
+          callback(error instanceof Error ? error : new Error('could not be kept'))
+        }
       })
     },
   })

@@ -8,7 +8,7 @@ export function engineRoutes(deps: Deps): Router {
   route(router, deps, 'checkColumn', ({ principal, body }) => checkColumn(deps, principal, body))
   route(router, deps, 'designBasePlate', ({ body }) => designBasePlate(deps, body))
   route(router, deps, 'propose', ({ principal, body }) => propose(deps, principal, body))
-  route(router, deps, 'listSections', ({ query }) => Promise.resolve(listSections(deps, query)))
-  route(router, deps, 'readSection', ({ params }) => Promise.resolve(readSection(deps, params.designation)))
+  route(router, deps, 'listSections', ({ query }) => listSections(deps, query))
+  route(router, deps, 'readSection', ({ params }) => readSection(deps, params.designation))
   return router
 }

@@ -9,16 +9,21 @@ import { currentBook } from '../price-books/price-books.service.ts'
 import { priceForCustomer } from '../price-books/customer-price.service.ts'
 import { toSectionDetail, toSectionSummary } from './sections.map.ts'
 
-export function listSections(
-  { catalogue }: Deps,
+export async function listSections(
+  { catalogue, db, clock }: Deps,
   { family, q, limit }: QueryOf<'listSections'>,
-): AnswerOf<'listSections'> {
+): Promise<AnswerOf<'listSections'>> {
+  const book = await currentBook(db, clock())
   const found = catalogue.search(q ?? '', family ? [family] : undefined)
-  return { items: found.slice(0, limit).map(toSectionSummary) }
+  return { items: found.slice(0, limit).map((section) => toSectionSummary(section, book)) }
 }
 
-export function readSection({ catalogue }: Deps, designation: string): AnswerOf<'readSection'> {
-  return toSectionDetail(catalogue.find(designation) ?? notFound('section'))
+export async function readSection(
+  { catalogue, db, clock }: Deps,
+  designation: string,
+): Promise<AnswerOf<'readSection'>> {
+  const section = catalogue.find(designation) ?? notFound('section')
+  return toSectionDetail(section, await currentBook(db, clock()))
 }
 
 /** Strengths that are no steel's are for the estimator to answer for. */

@@ -6,8 +6,8 @@ export async function insertLetter(trx: Trx, row: Insertable<OutboxTable>): Prom
   await trx.insertInto('outbox').values(row).execute()
 }
 
-/** Waiting ones whose turn it is, oldest first. */
-export function dueLetters(db: Reader, now: string, limit: number): Promise<OutboxTable[]> {
+/** The waiting one whose turn has come longest ago. */
+export function dueLetter(db: Reader, now: string): Promise<OutboxTable | undefined> {
   return db
     .selectFrom('outbox')
     .selectAll()
@@ -15,12 +15,27 @@ export function dueLetters(db: Reader, now: string, limit: number): Promise<Outb
     .where('nextAt', '<=', now)
     .orderBy('nextAt')
     .orderBy('createdAt')
-    .limit(limit)
-    .execute()
+    .limit(1)
+    .executeTakeFirst()
 }
 
 export async function updateLetter(trx: Trx, id: string, change: Updateable<OutboxTable>): Promise<void> {
   await trx.updateTable('outbox').set(change).where('id', '=', id).execute()
+}
+
+/** Only while it is still that try's: whoever took it over meanwhile, or sent it, knows better. */
+export async function updateFailedTry(
+  trx: Trx,
+  { id, attempts }: Pick<OutboxTable, 'id' | 'attempts'>,
+  change: Updateable<OutboxTable>,
+): Promise<void> {
+  await trx
+    .updateTable('outbox')
+    .set(change)
+    .where('id', '=', id)
+    .where('status', '=', 'waiting')
+    .where('attempts', '=', attempts)
+    .execute()
 }
 
 export function lettersAbout(db: Reader, quoteId: string): Promise<OutboxTable[]> {

@@ -5,7 +5,7 @@ import { write, type Reader, type Trx } from '../../db/open-database.ts'
 import type { Deps } from '../../deps.ts'
 import { composeMail } from '../../mail/compose-mail.ts'
 import type { Letter } from '../../mail/letters.ts'
-import { dueLetters, insertLetter, lettersAbout, updateLetter } from './outbox.repo.ts'
+import { dueLetter, insertLetter, lettersAbout, updateFailedTry, updateLetter } from './outbox.repo.ts'
 import type { OutboxTable } from './outbox.table.ts'
 
 const attachment = z.object({ key: z.string(), fileName: z.string(), contentType: z.string() })
@@ -35,9 +35,9 @@ export async function enqueueMail(trx: Trx, { letter, to, at, ...about }: NewLet
 
 const SECOND = 1000
 /** While one is at a letter nobody else takes it; one that died over it gives it up after this. */
-const LEASE_MS = 60 * SECOND
+const LEASE_MS = 120 * SECOND
 const MOST_ATTEMPTS = 10
-const BATCH = 20
+const MOST_PER_TURN = 20
 
 /** Half a minute, doubling to an hour. */
 function waitAfter(attempts: number): number {
@@ -46,21 +46,31 @@ function waitAfter(attempts: number): number {
 
 /** Sends what is due. What cannot be sent is tried later, and parked after ten tries. */
 export async function deliverDue(deps: Deps): Promise<void> {
-  const { db, clock } = deps
-  const letters = await write(db, async (trx) => {
+  for (let turn = 0; turn < MOST_PER_TURN; turn += 1) {
+    const letter = await claimNext(deps)
+    if (!letter) return
+    await deliver(deps, letter)
+  }
+}
+
+/** One at a time: the time for which it is claimed is then for sending this one alone. */
+function claimNext({ db, clock }: Deps): Promise<OutboxTable | undefined> {
+  return write(db, async (trx) => {
     const now = clock()
-    const due = await dueLetters(trx, now.toISOString(), BATCH)
-    const freeAt = new Date(now.getTime() + LEASE_MS).toISOString()
-    for (const { id, attempts } of due)
-      await updateLetter(trx, id, { nextAt: freeAt, attempts: attempts + 1 })
-    return due
+    const letter = await dueLetter(trx, now.toISOString())
+    if (!letter) return undefined
+    const claim = {
+      nextAt: new Date(now.getTime() + LEASE_MS).toISOString(),
+      attempts: letter.attempts + 1,
+    }
+    await updateLetter(trx, letter.id, claim)
+    return { ...letter, ...claim }
   })
-  for (const letter of letters) await deliver(deps, letter)
 }
 
 async function deliver(deps: Deps, letter: OutboxTable): Promise<void> {
   const { db, clock, logger } = deps
-  const attempts = letter.attempts + 1
+  const { attempts } = letter
   try {
     await send(deps, letter)
     await write(db, (trx) =>
@@ -71,7 +81,7 @@ async function deliver(deps: Deps, letter: OutboxTable): Promise<void> {
     const lastError = error instanceof Error ? error.message.slice(0, 500) : 'unknown'
     const nextAt = new Date(clock().getTime() + waitAfter(attempts)).toISOString()
     const parked = attempts >= MOST_ATTEMPTS ? { status: 'parked' as const } : {}
-    await write(db, (trx) => updateLetter(trx, letter.id, { lastError, nextAt, ...parked }))
+    await write(db, (trx) => updateFailedTry(trx, letter, { lastError, nextAt, ...parked }))
   }
 }
 

@@ -10,6 +10,7 @@ import type { Once } from '../../http/once.ts'
 import { actorOf, nameForAudit, type Principal } from '../../http/principal.ts'
 import { recordAudit } from '../audit/audit.service.ts'
 import { readOrder } from '../orders/read-orders.service.ts'
+import { openCheckout } from './open-checkout.service.ts'
 import { insertPayment, paymentsAbout, updatePayment } from './payments.repo.ts'
 import type { PaymentsTable } from './payments.table.ts'
 
@@ -42,7 +43,7 @@ export async function payDeposit(
     await write(deps.db, (trx) => once(trx, answer))
     return answer
   }
-  const session = await askProcessor(deps, order, payment)
+  const session = await openCheckout(deps, order, payment)
   const answer = { url: session.url, amount }
   await write(deps.db, async (trx) => {
     await updatePayment(trx, payment.id, {
@@ -96,40 +97,4 @@ function openPayment(
 function isOpen({ status, sessionExpiresAt }: PaymentsTable, at: string): boolean {
   if (status !== 'pending' && status !== 'failed') return false
   return sessionExpiresAt === null ? status === 'pending' : sessionExpiresAt > at
-}
-
-async function askProcessor({ stripe, config, logger }: Deps, order: OrderDto, payment: PaymentsTable) {
-  const metadata = { paymentId: payment.id, orderId: order.id }
-  const back = `${config.publicUrl}/orders/${order.id}`
-  try {
-    const session = await stripe.checkout.sessions.create(
-      {
-        mode: 'payment',
-        client_reference_id: order.number,
-        metadata,
-        payment_intent_data: { metadata, description: `Deposit, order ${order.number}` },
-        line_items: [
-          {
-            quantity: 1,
-            price_data: {
-              currency: payment.currency.toLowerCase(),
-              unit_amount: payment.amount,
-              product_data: { name: `Deposit, order ${order.number}` },
-            },
-          },
-        ],
-        success_url: `${back}?paid=yes`,
-        cancel_url: `${back}?paid=no`,
-      },
-      { idempotencyKey: payment.id },
-    )
-    if (!session.url) throw new Error('a checkout without a page')
-    return { id: session.id, url: session.url, expiresAt: new Date(session.expires_at * 1000).toISOString() }
-  } catch (error) {
-    logger.error({ err: error, payment: payment.id }, 'the processor did not open a checkout')
-    return fail(
-      'processor-unavailable',
-      'The card page could not be opened. Nothing was taken; try again in a minute.',
-    )
-  }
 }

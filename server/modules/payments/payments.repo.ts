@@ -24,6 +24,34 @@ export async function updatePayment(trx: Trx, id: string, change: Updateable<Pay
   await trx.updateTable('payments').set(change).where('id', '=', id).execute()
 }
 
+/** Closes a payment of which no page was ever shown. */
+export async function closeUnopened(trx: Trx, id: string, failure: string): Promise<void> {
+  await trx
+    .updateTable('payments')
+    .set({ status: 'failed', failure })
+    .where('id', '=', id)
+    .where('status', '=', 'pending')
+    .where('sessionId', 'is', null)
+    .execute()
+}
+
+/** Whose page was shown and of which the outcome is not known, while the processor may still tell. */
+export function unsettledPayments(
+  db: Reader,
+  { openedBefore, endedAfter, limit }: { openedBefore: string; endedAfter: string; limit: number },
+): Promise<PaymentsTable[]> {
+  return db
+    .selectFrom('payments')
+    .selectAll()
+    .where('status', 'in', ['pending', 'failed'])
+    .where('sessionId', 'is not', null)
+    .where('createdAt', '<=', openedBefore)
+    .where('sessionExpiresAt', '>', endedAfter)
+    .orderBy('createdAt')
+    .limit(limit)
+    .execute()
+}
+
 /** Kept once; one that is sent again and was not acted on yet has its turn at once. */
 export async function keepEvent(trx: Trx, row: Insertable<StripeEventsTable>): Promise<void> {
   await trx

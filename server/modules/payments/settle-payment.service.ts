@@ -12,7 +12,8 @@ import { findEvent, findPayment, updateEvent, updatePayment } from './payments.r
 import { depositPaid } from './payments.service.ts'
 import type { PaymentsTable, StripeEventsTable } from './payments.table.ts'
 
-const PROCESSOR = 'the card processor'
+/** How the audit trail names it. */
+export const PROCESSOR = 'the card processor'
 
 /** What the processor says of a checkout against what we asked for; a word for what differs, or nothing. */
 function difference(payment: PaymentsTable, session: Stripe.Checkout.Session): string | undefined {
@@ -94,12 +95,18 @@ async function bookDeposit(
   if (paid.amount >= order.due.amount) await releaseOrder(trx, order.id, paid, PROCESSOR, at)
 }
 
+interface Failure {
+  paymentId: string | undefined
+  reason: string
+  /** The checkout that cannot be paid any more, if it is closed. */
+  closed: string | undefined
+}
+
 /** The card was refused, or the page was left. What is settled stays settled, whichever event comes last. */
 export async function failPayment(
   { db, clock, config, shop }: Deps,
   event: StripeEventsTable,
-  paymentId: string | undefined,
-  reason: string,
+  { paymentId, reason, closed }: Failure,
 ): Promise<void> {
   await write(db, async (trx) => {
     const at = clock().toISOString()
@@ -110,13 +117,16 @@ export async function failPayment(
     const again = payment.status === 'failed' ? payment.status : undefined
     const status = statusAfter('payment', 'system', payment.status, 'fail') ?? again
     if (!status) return finish(`already ${payment.status}`)
-    await updatePayment(trx, payment.id, { status, failure: reason })
+    const ended = closed !== undefined && closed === payment.sessionId ? { sessionExpiresAt: at } : {}
+    await updatePayment(trx, payment.id, { status, failure: reason, ...ended })
     const order = await orderForPayment(trx, payment.orderId)
     const amount = money(payment.amount, payment.currency)
     await recordAudit(trx, {
       ...{ at, who: PROCESSOR, action: 'payment failed', record: order.number },
       after: { payment: payment.id, reason },
     })
+    // Paid meanwhile in another way: a letter that asks to try again would only alarm.
+    if (order.status !== 'awaiting deposit') return finish('failed')
     await enqueueMail(trx, {
       ...{ to: order.contact.email, at, quoteId: order.quoteId, orderId: order.id },
       letter: {

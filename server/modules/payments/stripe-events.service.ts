@@ -2,9 +2,10 @@ import { z } from 'zod'
 import { write } from '../../db/open-database.ts'
 import type { Deps } from '../../deps.ts'
 import { fail } from '../../errors.ts'
+import { recordAudit } from '../audit/audit.service.ts'
 import { dueEvents, keepEvent, updateEvent } from './payments.repo.ts'
 import type { StripeEventsTable } from './payments.table.ts'
-import { failPayment, settlePayment } from './settle-payment.service.ts'
+import { failPayment, PROCESSOR, settlePayment } from './settle-payment.service.ts'
 
 /** An event may be this old, or this far ahead, and no more: the SDK does not look at the future. */
 const TOLERANCE_S = 300
@@ -12,7 +13,14 @@ const LEASE_MS = 45_000
 const MOST_ATTEMPTS = 50
 const BATCH = 20
 
-const signedAt = (header: string) => Number(/(?:^|,)t=(\d+)/.exec(header)?.[1] ?? 0)
+// The last one counts when there are several, as it does for the SDK.
+const signedAt = (header: string) =>
+  Number(
+    header
+      .split(',')
+      .findLast((part) => part.startsWith('t='))
+      ?.slice(2) ?? 0,
+  )
 const aboutObject = z.object({ id: z.string() })
 
 /** Takes a signed event into the inbox. Throws for one that is not the processor's; twice the same is once. */
@@ -68,8 +76,19 @@ async function handleEvent(deps: Deps, event: StripeEventsTable): Promise<void> 
     const wait = Math.min(2000 * 2 ** attempts, 3_600_000)
     const nextAt = new Date(clock().getTime() + wait).toISOString()
     const outcome = error instanceof Error ? error.message.slice(0, 300) : 'unknown'
-    const parked = attempts >= MOST_ATTEMPTS ? { handledAt: clock().toISOString() } : {}
-    await write(db, (trx) => updateEvent(trx, event.id, { nextAt, outcome, ...parked }))
+    await write(db, async (trx) => {
+      if (attempts < MOST_ATTEMPTS) return updateEvent(trx, event.id, { nextAt, outcome })
+      const at = clock().toISOString()
+      const record = { type: event.type, object: event.objectId, outcome }
+      await recordAudit(trx, {
+        at,
+        who: PROCESSOR,
+        action: 'event given up',
+        record: event.id,
+        after: record,
+      })
+      return updateEvent(trx, event.id, { outcome, handledAt: at })
+    })
   }
 }
 
@@ -85,13 +104,14 @@ async function act(deps: Deps, event: StripeEventsTable): Promise<void> {
       const session = await stripe.checkout.sessions.retrieve(event.objectId)
       const reason =
         session.status === 'expired' ? 'The card page was left open too long.' : 'The bank refused it.'
-      return failPayment(deps, event, session.metadata?.paymentId, reason)
+      const closed = session.status === 'open' ? undefined : session.id
+      return failPayment(deps, event, { paymentId: session.metadata?.paymentId, reason, closed })
     }
     case 'payment_intent.payment_failed': {
       const intent = await stripe.paymentIntents.retrieve(event.objectId)
       if (intent.status === 'succeeded') return write(db, (trx) => done(trx, event, 'overtaken', clock()))
       const reason = intent.last_payment_error?.message ?? 'The bank refused it.'
-      return failPayment(deps, event, intent.metadata.paymentId, reason)
+      return failPayment(deps, event, { paymentId: intent.metadata.paymentId, reason, closed: undefined })
     }
     default:
       return write(db, (trx) => done(trx, event, 'not needed', clock()))

@@ -2,13 +2,14 @@ import express, { Router } from 'express'
 import { z } from 'zod'
 import { fakePage } from '../../fake-page.ts'
 import { escapeHtml } from '../../html.ts'
+import { moneyText } from '../../money-and-dates.ts'
 import type { CardFake } from './card-fake.ts'
 import type { CardSession } from './card-store.ts'
 
 const choice = z.object({ outcome: z.enum(['accept', 'decline', 'no funds']) })
 
 function amountText({ amount, currency }: CardSession): string {
-  return `${currency.toUpperCase()} ${(amount / 100).toFixed(2)}`
+  return moneyText({ amount, currency: currency.toUpperCase() })
 }
 
 function bodyOf(session: CardSession): string {
