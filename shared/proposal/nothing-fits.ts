@@ -1,20 +1,13 @@
-import type { PriceBook } from '../pricing/price-book.ts'
-import { barPriceOf } from '../pricing/price-book.ts'
+import { barPriceOf, type PriceBook } from '../pricing/price-book.ts'
 import { limitsBroken, type Candidate, type LimitName } from './candidates.ts'
-import type { LineAsked } from './line-asked.ts'
+import { leastBy } from './least-by.ts'
+import type { Limits, LineAsked } from './line-asked.ts'
 import { percentText } from './words.ts'
 
 export interface NoProposal {
   found: false
   reason: string
   nearest: { section: string; utilisation: number; needs: string } | null
-}
-
-const WAYS: Record<LimitName, string> = {
-  depth: 'the limit of depth',
-  width: 'the limit of width',
-  utilisation: 'strength: every shape that keeps the other limits is too weak',
-  slenderness: 'the limit of slenderness',
 }
 
 /** Which limit stands in the way, and what the nearest shape would need. */
@@ -24,26 +17,18 @@ export function nothingFits(
   holding: readonly Candidate[],
   book: PriceBook,
 ): NoProposal {
-  const first = holding[0]
-  if (first) return { found: false, reason: whyNotMade(asked, first, book), nearest: nearestOf(first, asked) }
-  const broken = screened.map((one) => ({ one, limits: limitsBroken(one, asked.limits) }))
-  const fewest = Math.min(...broken.map(({ limits }) => limits.length))
-  const close = broken.filter(({ limits }) => limits.length === fewest)
-  // Strength first: of shapes that miss one limit each, the one that works least hard over it is the nearest.
-  const ways = new Set(close.flatMap(({ limits }) => limits))
-  const nearest = close.reduce<(typeof close)[number] | undefined>(
-    (best, next) => (!best || next.one.screening.utilisation < best.one.screening.utilisation ? next : best),
-    undefined,
-  )
-  const alone = ways.size === 1 && ways.has('utilisation')
-  const stands = [...ways].map((way) => WAYS[way]).join(', or ')
-  return {
-    found: false,
-    reason: alone
-      ? 'No shape that the shop buys is strong enough: add a brace, hold an end, or share the load over more columns.'
-      : `What stands in the way is ${stands}.`,
-    nearest: nearest ? nearestOf(nearest.one, asked) : null,
+  const [first] = holding
+  if (first) {
+    const { designation } = first.section
+    const needs = 'a base or a bar that the shop does not have'
+    return {
+      found: false,
+      reason: whyNotMade(asked, first, book),
+      nearest: { section: designation, utilisation: first.screening.utilisation, needs },
+    }
   }
+  const nearest = nearestOf(screened, asked.limits)
+  return { found: false, reason: whyNoneHolds(screened, asked.limits), nearest }
 }
 
 /** It holds, and still cannot be made or set on its base. */
@@ -57,15 +42,75 @@ function whyNotMade(asked: LineAsked, { section }: Candidate, book: PriceBook): 
     : 'Shapes hold, but no base plate that the shop stocks does: ask the shop.'
 }
 
-function nearestOf({ section, screening }: Candidate, { limits }: LineAsked): NoProposal['nearest'] {
-  const needs: string[] = []
-  const { utilisation, slenderness } = screening
-  if (section.depth > (limits.maxDepth ?? Infinity)) needs.push(`a depth of ${section.depth.toFixed(0)} mm`)
-  if (section.width > (limits.maxWidth ?? Infinity)) needs.push(`a width of ${section.width.toFixed(0)} mm`)
-  if (utilisation > limits.maxUtilisation) {
-    needs.push(`to work at ${percentText(utilisation)} of its strength`)
+const NAMES: readonly LimitName[] = ['depth', 'width', 'utilisation', 'slenderness']
+
+function inWords(name: LimitName, limits: Limits): string {
+  switch (name) {
+    case 'depth':
+      return `the limit of depth, ${(limits.maxDepth ?? Infinity).toFixed(0)} mm`
+    case 'width':
+      return `the limit of width, ${(limits.maxWidth ?? Infinity).toFixed(0)} mm`
+    case 'utilisation':
+      return `the limit of utilisation, ${percentText(limits.maxUtilisation)}`
+    case 'slenderness':
+      return `the limit of slenderness, ${limits.maxSlenderness ?? Infinity}`
   }
-  if (slenderness > (limits.maxSlenderness ?? Infinity)) needs.push(`an Lc/r of ${slenderness.toFixed(0)}`)
-  const wanted = needs.length > 0 ? needs.join(' and ') : 'a base or a bar that the shop does not have'
-  return { section: section.designation, utilisation, needs: wanted }
+}
+
+function isStrongEnough({ screening }: Candidate): boolean {
+  return screening.utilisation <= 1
+}
+
+/** Limits that alone keep a strong enough shape out; or all that do together; or strength itself. */
+function whyNoneHolds(screened: readonly Candidate[], limits: Limits): string {
+  const keptOut = screened.filter(isStrongEnough).map((candidate) => limitsBroken(candidate, limits))
+  if (keptOut.length === 0) {
+    return 'No shape that the shop buys is strong enough: add a brace, hold an end, or share the load over more columns.'
+  }
+  const alone = NAMES.filter((name) => keptOut.some(([only, ...more]) => only === name && more.length === 0))
+  if (alone.length > 0) {
+    return `What stands in the way is ${alone.map((name) => inWords(name, limits)).join(', or ')}.`
+  }
+  const together = NAMES.filter((name) => keptOut.some((broken) => broken.includes(name)))
+  return `What stands in the way is ${together.map((name) => inWords(name, limits)).join(' and ')} together.`
+}
+
+/** By how much a shape is over the worst of its limits: 1 is the limit. */
+function overLimits({ section, screening }: Candidate, limits: Limits): number {
+  return Math.max(
+    section.depth / (limits.maxDepth ?? Infinity),
+    section.width / (limits.maxWidth ?? Infinity),
+    screening.utilisation / limits.maxUtilisation,
+    screening.slenderness / (limits.maxSlenderness ?? Infinity),
+  )
+}
+
+/** Of the shapes that are strong enough, the one that is over its limits by the least; the strongest where none is. */
+function nearestOf(screened: readonly Candidate[], limits: Limits): NoProposal['nearest'] {
+  const strong = screened.filter(isStrongEnough)
+  const nearest =
+    strong.length > 0
+      ? leastBy(strong, (candidate) => overLimits(candidate, limits))
+      : leastBy(screened, ({ screening }) => screening.utilisation)
+  if (!nearest) return null
+  const { section, screening } = nearest
+  const needs = limitsBroken(nearest, limits).map((name) => needed(name, nearest, limits))
+  return {
+    section: section.designation,
+    utilisation: screening.utilisation,
+    needs: needs.join(' and '),
+  }
+}
+
+function needed(name: LimitName, { section, screening }: Candidate, limits: Limits): string {
+  switch (name) {
+    case 'depth':
+      return `a depth of ${section.depth.toFixed(0)} mm`
+    case 'width':
+      return `a width of ${section.width.toFixed(0)} mm`
+    case 'utilisation':
+      return `to work at ${percentText(screening.utilisation)}, with a limit of ${percentText(limits.maxUtilisation)}`
+    case 'slenderness':
+      return `an Lc/r of ${screening.slenderness.toFixed(0)}`
+  }
 }
