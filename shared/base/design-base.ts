@@ -14,7 +14,7 @@ const NOT_COVERED =
   'Concrete breakout, pull-out and shear at the anchor rods, and the footing itself, are not covered here: the engineer of record designs them.'
 
 /** Everything that cannot be taken, each with its field. */
-function issuesOf({ section, required, concrete, plate, rods, stock }: BaseInput): Issue[] {
+export function issuesOf({ section, required, concrete, plate, rods, stock }: BaseInput): Issue[] {
   const issues: Issue[] = []
   const say = (path: string, message: string) => issues.push({ path, message })
   if (!(required.compression >= 0)) say('required.compression', 'newtons, 0 or more')

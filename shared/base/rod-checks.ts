@@ -31,7 +31,7 @@ export function rodChecks(input: BaseInput, parts: BaseParts, method: Method): F
   const { rods, plate } = parts
   const Fu = rodSteel(rods.grade)?.Fu ?? 0
   const capacity = rodAvailable(Fu, rods.diameter, method)
-  const worst = erectionOf(section, parts)
+  const worst = worstErection(section, parts)
   const steps = rodSteps(Fu, rods.diameter, method)
   const isPost = weight !== undefined && weight <= POST_WEIGHT
   const checks: Check[] = []
@@ -52,7 +52,7 @@ export function rodChecks(input: BaseInput, parts: BaseParts, method: Method): F
   }
 }
 
-interface Erection {
+export interface Erection {
   moment: number
   spacing: number
   onSide: number
@@ -60,7 +60,10 @@ interface Erection {
 }
 
 /** The erection load each way; the way that pulls a rod the most. Undefined where no rod has room. */
-function erectionOf({ depth, width }: BaseInput['section'], { rods }: BaseParts): Erection | undefined {
+export function worstErection(
+  { depth, width }: BaseInput['section'],
+  { rods }: BaseParts,
+): Erection | undefined {
   if (rods.positions.length === 0) return undefined
   const about = (axis: 0 | 1, size: number): Erection => {
     const at = rods.positions.map((position) => position[axis])

@@ -14,16 +14,16 @@ export interface FootLoads {
 
 type Given = Pick<BaseInput, 'plate' | 'rods'>
 
-/** The base of a line: what is given is checked, the rest found from what the shop stocks. */
-export function baseOfLine(
+/** What a base of this line must do; what is given of it is checked, the rest found from what the shop stocks. */
+export function baseInput(
   asked: Pick<LineAsked, 'base' | 'standard' | 'method' | 'height'>,
   book: PriceBook,
   section: Section,
   { compression, uplift }: FootLoads,
   given: Given = {},
-): BaseDesign {
+): BaseInput {
   const method: Method = asked.method ?? 'LRFD'
-  return designBase({
+  return {
     standard: asked.standard,
     method,
     section,
@@ -35,5 +35,10 @@ export function baseOfLine(
     },
     weight: selfWeight(section.mass, asked.height ?? 0),
     ...given,
-  })
+  }
+}
+
+/** The base of a line, designed in full. */
+export function baseOfLine(...of: Parameters<typeof baseInput>): BaseDesign {
+  return designBase(baseInput(...of))
 }

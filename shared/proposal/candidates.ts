@@ -12,9 +12,7 @@ import { screenColumn, type Screening } from '../standards/screen-column.ts'
 import { Refusal } from '../units/refusal.ts'
 import type { Limits, LineAsked } from './line-asked.ts'
 
-export interface Candidate {
-  section: Section
-  steel: Steel
+export interface Candidate extends Stocked {
   screening: Screening
 }
 
@@ -30,37 +28,39 @@ export function familiesFor(
   return asked.filter((family) => known.includes(family) && barPriceOf(book, family))
 }
 
-/** The steel of each shape, where what was asked is made of it. Refuses a grade that none of them is made of. */
-function steelsOf(sections: readonly Section[], grade: LineAsked['grade']): Map<Section, Steel> {
-  const steels = new Map<Section, Steel>()
-  // US steels are a family's; a fault of one shape of it is a fault of all.
+/** A shape with the steel that it would be of. */
+export interface Stocked {
+  section: Section
+  steel: Steel
+}
+
+/** Shapes of these families, each in the steel that was asked. Refuses a grade that none of them is made of. */
+export function stockOf(sections: readonly Section[], grade: LineAsked['grade']): Stocked[] {
+  const stock: Stocked[] = []
+  // A steel that one shape of a family is not made of, none of it is.
   const faults = new Map<Family, Refusal>()
   for (const section of sections) {
     if (faults.has(section.family)) continue
     try {
-      steels.set(section, steelFor(grade, section))
+      stock.push({ section, steel: steelFor(grade, section) })
     } catch (error) {
       if (!(error instanceof Refusal)) throw error
       if (error.issues.some(({ path }) => path.startsWith('grade'))) faults.set(section.family, error)
     }
   }
   const [fault] = faults.values()
-  if (steels.size === 0 && fault) throw fault
-  return steels
+  if (stock.length === 0 && fault) throw fault
+  return stock
 }
 
-/** Every shape of these on numbers alone, but those that a standard has no strength for. */
-export function screenSections(
-  prepared: PreparedColumn,
-  sections: readonly Section[],
-  grade: LineAsked['grade'],
-): Candidate[] {
-  const steels = steelsOf(sections, grade)
-  return sections.flatMap((section) => {
-    const steel = steels.get(section)
-    if (!steel || !isCovered(prepared, section, steel.Fy)) return []
-    return [{ section, steel, screening: screenColumn(prepared, section, steel) }]
-  })
+/** Every one of these on numbers alone, but those that a standard has no strength for. */
+export function screenStock(prepared: PreparedColumn, stock: readonly Stocked[]): Candidate[] {
+  const candidates: Candidate[] = []
+  for (const { section, steel } of stock) {
+    if (!isCovered(prepared, section, steel.Fy)) continue
+    candidates.push({ section, steel, screening: screenColumn(prepared, section, steel) })
+  }
+  return candidates
 }
 
 /** Whether the clauses that are here cover a shape: E7.2 and chapter F, or round shapes below class 4. */

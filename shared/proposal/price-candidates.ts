@@ -1,18 +1,16 @@
+import { baseOfLine, baseInput } from './base-of-line.ts'
 import type { BaseDesign } from '../base/base-design.ts'
+import { quickBase } from '../base/quick-base.ts'
 import { priceCandidate, type CandidatePrice } from '../pricing/candidate.ts'
-import { exact } from '../pricing/exact.ts'
 import type { LineSpec } from '../pricing/line-spec.ts'
-import { moneyToExact } from '../pricing/money.ts'
+import { minorUnits } from '../pricing/money.ts'
 import type { PriceBook } from '../pricing/price-book.ts'
-import { lineSpecOf } from '../quoting/defaults.ts'
-import { Refusal } from '../units/refusal.ts'
-import { baseOfLine } from './base-of-line.ts'
+import { lineSpecOf, type ChosenBase } from '../quoting/defaults.ts'
 import type { Candidate } from './candidates.ts'
-import { leastPrice } from './least-price.ts'
+import { leastByShape, leastByWork } from './least-price.ts'
 import type { LineAsked } from './line-asked.ts'
 
 export interface PricedCandidate extends Candidate {
-  base: BaseDesign | null
   spec: LineSpec
   price: CandidatePrice
 }
@@ -22,20 +20,17 @@ export interface PriceTerms {
   delivery: { km: number } | null
 }
 
-/** How a candidate would be made and what it would cost; undefined where it has no base that holds, or no price. */
-export function priceOne(
-  asked: LineAsked,
-  candidate: Candidate,
-  { book, delivery }: PriceTerms,
-): PricedCandidate | undefined {
-  const base = asked.base.plate ? tryBase(asked, candidate, book) : null
-  if (base === undefined) return undefined
-  const spec = specOf(asked, candidate, base)
-  const price = priceCandidate(book, candidate.section, spec, { delivery })
-  return price && { ...candidate, base, spec, price }
+/** How a candidate would be made; undefined where no base of it holds. */
+function makeOf(asked: LineAsked, candidate: Candidate, book: PriceBook): LineSpec | undefined {
+  if (!asked.base.plate) return specOf(asked, candidate, null)
+  const parts = quickBase(baseInput(asked, book, candidate.section, candidate.screening))
+  if (!parts) return undefined
+  const { plate, rods, hole, leg } = parts
+  const holes = { count: rods.count, diameter: hole }
+  return specOf(asked, candidate, { plate, rods, holes, welds: { leg, length: candidate.section.perimeter } })
 }
 
-export function specOf(asked: LineAsked, { section, steel }: Candidate, base: BaseDesign | null): LineSpec {
+export function specOf(asked: LineAsked, { section, steel }: Candidate, base: ChosenBase | null): LineSpec {
   const { mark, quantity, finish, height = 0 } = asked
   return lineSpecOf({
     ...{ mark, quantity, section, grade: steel.name, height, finish, base },
@@ -44,26 +39,39 @@ export function specOf(asked: LineAsked, { section, steel }: Candidate, base: Ba
   })
 }
 
-function tryBase(
+/** What a candidate would cost; undefined where it has no base that holds, or no price. */
+export function priceOne(
+  asked: LineAsked,
+  candidate: Candidate,
+  terms: PriceTerms,
+): PricedCandidate | undefined {
+  const spec = makeOf(asked, candidate, terms.book)
+  return spec && priceMade(candidate, spec, terms)
+}
+
+function priceMade(
+  candidate: Candidate,
+  spec: LineSpec,
+  { book, delivery }: PriceTerms,
+): PricedCandidate | undefined {
+  const price = priceCandidate(book, candidate.section, spec, { delivery })
+  return price && { ...candidate, spec, price }
+}
+
+/** The base of a candidate in full, with its steps. */
+export function baseOf(
   asked: LineAsked,
   { section, screening }: Candidate,
   book: PriceBook,
-): BaseDesign | undefined {
-  try {
-    const base = baseOfLine(asked, book, section, screening)
-    return base.verdict === 'holds' ? base : undefined
-  } catch (error) {
-    // A pier smaller than the shape: another shape may stand on it.
-    if (error instanceof Refusal) return undefined
-    throw error
-  }
+): BaseDesign | null {
+  return asked.base.plate ? baseOfLine(asked, book, section, screening) : null
 }
 
 const delivered = ({ price }: PricedCandidate) => price.delivered.amount
 
 /**
- * The `count` cheapest as delivered, cheapest first: the same as pricing every candidate, but shapes whose steel alone
- * costs more than what is found already are left out.
+ * The `count` cheapest as delivered, cheapest first: the same as pricing every candidate, but what cannot be cheaper than
+ * those found already is left out, by two bounds.
  */
 export function cheapest(
   asked: LineAsked,
@@ -71,15 +79,21 @@ export function cheapest(
   terms: PriceTerms,
   count: number,
 ): PricedCandidate[] {
+  const minor = minorUnits(terms.book.currency)
+  const leastOf = leastByShape(terms, asked)
   const ordered = candidates
-    .map((candidate) => ({ candidate, least: leastPrice(terms, asked, candidate.section) }))
+    .map((candidate) => ({ candidate, least: leastOf(candidate.section) }))
     .sort((a, b) => a.least - b.least)
   let best: PricedCandidate[] = []
+  // Each piece is rounded to the cent, and so is delivery: a bound may be above a price by that much.
+  const slack = (asked.quantity + 1) / minor
   for (const { candidate, least } of ordered) {
     const worst = best.length === count ? best.at(-1) : undefined
-    // Each piece is rounded to the cent.
-    if (worst && exact(least).minus(asked.quantity).gt(moneyToExact(worst.price.delivered))) break
-    const priced = priceOne(asked, candidate, terms)
+    const limit = worst ? delivered(worst) / minor + slack : Infinity
+    if (least > limit) break
+    const spec = makeOf(asked, candidate, terms.book)
+    if (!spec || leastByWork(terms, spec, candidate.section) > limit) continue
+    const priced = priceMade(candidate, spec, terms)
     if (priced) best = [...best, priced].sort((a, b) => delivered(a) - delivered(b)).slice(0, count)
   }
   return best

@@ -11,12 +11,19 @@ import { checkColumn, type ColumnCheck } from '../standards/check-column.ts'
 import { checkFamily } from '../standards/families.ts'
 import { prepareColumn, type PreparedColumn } from '../standards/prepare-column.ts'
 import { Refusal, refuse, type Issue } from '../units/refusal.ts'
-import { baseOfLine } from './base-of-line.ts'
-import { familiesFor, limitsBroken, screenSections, type Candidate } from './candidates.ts'
+import { familiesFor, limitsBroken, screenStock, stockOf, type Candidate } from './candidates.ts'
+import { leastBy } from './least-by.ts'
 import type { LineAsked } from './line-asked.ts'
 import { nextLighter, type NextLighter } from './next-lighter.ts'
 import { nothingFits, type NoProposal } from './nothing-fits.ts'
-import { cheapest, priceOne, specOf, type PricedCandidate, type PriceTerms } from './price-candidates.ts'
+import {
+  baseOf,
+  cheapest,
+  priceOne,
+  specOf,
+  type PricedCandidate,
+  type PriceTerms,
+} from './price-candidates.ts'
 
 export interface Alternative {
   section: string
@@ -81,13 +88,14 @@ export function propose(input: ProposalInput): Proposal | NoProposal {
   const prepared = prepareColumn(asked)
   const families = familiesFor(asked, book)
   if (families.length === 0) refuse('limits.families', 'at least one family that the shop buys')
-  const screened = screenSections(prepared, catalogue.ofFamilies(families), asked.grade)
+  const screened = screenStock(prepared, stockOf(catalogue.ofFamilies(families), asked.grade))
   const holding = screened.filter((candidate) => limitsBroken(candidate, asked.limits).length === 0)
   const terms = { book, delivery }
   const ranked = rank(asked, holding, terms)
   const chosen = input.section === undefined ? ranked[0] : chooseByName(input, prepared, terms)
   if (!chosen) return nothingFits(asked, screened, holding, book)
-  const { section, steel, spec, base } = chosen
+  const { section, steel, spec } = chosen
+  const base = baseOf(asked, chosen, book)
   const { designation, designationSI, depth, width } = section
   return {
     found: true,
@@ -120,15 +128,6 @@ function rank(asked: LineAsked, holding: readonly Candidate[], terms: PriceTerms
 const same = (a: Candidate, b: Candidate) => a.section === b.section
 const planArea = ({ section }: { section: Section }) => section.depth * section.width
 
-function leastBy(
-  candidates: readonly Candidate[],
-  measure: (one: Candidate) => number,
-): Candidate | undefined {
-  let least: Candidate | undefined
-  for (const one of candidates) if (!least || measure(one) < measure(least)) least = one
-  return least
-}
-
 function alternativesOf(ranked: readonly PricedCandidate[]): Alternative[] {
   const lightest = leastBy(ranked, ({ section }) => section.mass)
   const slimmest = leastBy(ranked, planArea)
@@ -146,7 +145,7 @@ function alternativesOf(ranked: readonly PricedCandidate[]): Alternative[] {
   })
 }
 
-type Chosen = Candidate & { spec: LineSpec; base: BaseDesign | null }
+type Chosen = Candidate & { spec: LineSpec }
 
 /** A shape by its name, of any family that the shop buys: its verdict is the answer, whatever it is. */
 function chooseByName(
@@ -157,7 +156,7 @@ function chooseByName(
   const section = catalogue.find(name)
   if (!section) return refuse('section', `${name} is not in the catalogue; a designation such as W10X49`)
   checkFamily(section, prepared.terms.standard)
-  const [candidate] = screenSections(prepared, [section], asked.grade)
+  const [candidate] = screenStock(prepared, stockOf([section], asked.grade))
   if (!candidate)
     return refuse(
       'section',
@@ -165,6 +164,5 @@ function chooseByName(
     )
   const priced = priceOne(asked, candidate, terms)
   if (priced) return priced
-  const base = asked.base.plate ? baseOfLine(asked, book, section, candidate.screening) : null
-  return { ...candidate, base, spec: specOf(asked, candidate, base) }
+  return { ...candidate, spec: specOf(asked, candidate, baseOf(asked, candidate, book)) }
 }

@@ -4,7 +4,7 @@ import type { Section } from '../sections/section.ts'
 import { MM_PER_INCH } from '../units/convert.ts'
 
 /** What a designed base contributes; the answer of a base-plate design fits. */
-export interface BaseDesign {
+export interface ChosenBase {
   plate: { length: number; width: number; thickness: number }
   rods: { count: number; diameter: number; grade: string }
   holes: { count: number; diameter: number }
@@ -20,7 +20,7 @@ export interface ChosenLine {
   height: number
   finish: Finish
   /** null: no base plate. */
-  base: BaseDesign | null
+  base: ChosenBase | null
   /** Rods come with the column. */
   withRods: boolean
   /** A cap plate of the shop's own choice. */
@@ -55,7 +55,7 @@ export function lineSpecOf(chosen: ChosenLine): LineSpec {
   }
 }
 
-function rodsOf({ rods: { count, diameter, grade } }: BaseDesign): LineSpec['rods'] {
+function rodsOf({ rods: { count, diameter, grade } }: ChosenBase): LineSpec['rods'] {
   return { count, diameter, grade }
 }
 

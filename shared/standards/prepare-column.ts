@@ -19,6 +19,8 @@ export interface PreparedColumn {
   /** Offsets of weak-axis braces that do not stop twist, mm, each once. */
   braceOffsets: number[]
   combinations: [Combination, ...Combination[]]
+  /** Those of them that can press or lift the most, whatever the column itself weighs. */
+  extreme: [Combination, ...Combination[]]
   /** How the load bends the column; undefined where it acts along the axis. */
   bending: Bending | undefined
   /** Height whose weight is added to the dead load, mm; 0: none. */
@@ -97,6 +99,21 @@ function combinationsOf(request: ColumnRequest, terms: Terms): [Combination, ...
   return [first, ...rest]
 }
 
+/**
+ * The column's weight adds to each combination by its factor of dead load: among those with one factor the largest and
+ * the smallest stay so. The order is kept, so that ties fall as they would among all.
+ */
+function extremeOf(combinations: readonly [Combination, ...Combination[]]): [Combination, ...Combination[]] {
+  const kept = new Set<Combination>()
+  for (const factor of new Set(combinations.map(({ factors }) => factors.D))) {
+    const group = combinations.filter(({ factors }) => factors.D === factor)
+    kept.add(group.reduce((most, one) => (one.value > most.value ? one : most)))
+    kept.add(group.reduce((least, one) => (one.value < least.value ? one : least)))
+  }
+  const [first = combinations[0], ...rest] = combinations.filter((one) => kept.has(one))
+  return [first, ...rest]
+}
+
 /** Checks a request and solves what no shape changes. Refuses what cannot be taken, naming every field. */
 export function prepareColumn(request: ColumnRequest): PreparedColumn {
   const issues = requestIssues(request)
@@ -106,6 +123,7 @@ export function prepareColumn(request: ColumnRequest): PreparedColumn {
   if (issues.length > 0 || Array.isArray(terms)) throw new Refusal(issues)
   const solution = lengths ? givenSolution(lengths) : column && solveColumn(column)
   if (!solution) throw new Refusal([{ path: 'height', message: 'give the height of the column in mm' }])
+  const combinations = combinationsOf(request, terms)
   const weighed = request.selfWeight !== false && !request.required
   return {
     request,
@@ -113,7 +131,8 @@ export function prepareColumn(request: ColumnRequest): PreparedColumn {
     column: lengths ? undefined : column,
     solution,
     braceOffsets: offsetsOf(request),
-    combinations: combinationsOf(request, terms),
+    combinations,
+    extreme: extremeOf(combinations),
     bending: bendingOf(request),
     weighedHeight: weighed ? (request.height ?? 0) : 0,
   }
@@ -121,7 +140,7 @@ export function prepareColumn(request: ColumnRequest): PreparedColumn {
 
 /** Governing compression and worst uplift of a column of a shape of this mass, kg/m. */
 export function demandOf(prepared: PreparedColumn, massPerMetre: number): Extremes {
-  return extremes(prepared.combinations, selfWeight(massPerMetre, prepared.weighedHeight))
+  return extremes(prepared.extreme, selfWeight(massPerMetre, prepared.weighedHeight))
 }
 
 /** What one combination asks of a column: N, compression positive; first-order moments, N·mm. */

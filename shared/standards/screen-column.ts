@@ -1,11 +1,7 @@
 import { E_AISC, G_AISC, type Steel } from '../materials/steel.ts'
 import type { Section } from '../sections/section.ts'
-import {
-  bucklingModes,
-  governingMode,
-  nominalCompression,
-  type CompressionInput,
-} from './aisc360/compression.ts'
+import { lowestStress, nominalCompression, type CompressionInput } from './aisc360/compression.ts'
+import { nominalStress } from './aisc360/flexural-buckling.ts'
 import { available, FACTORS } from './aisc360/resistance.ts'
 import { slenderness } from './aisc360/slenderness.ts'
 import { availableTension } from './aisc360/tension.ts'
@@ -63,30 +59,26 @@ function screenAisc(
   steel: Pick<Steel, 'Fy' | 'Fu'>,
 ): Screening {
   const input = compressionInput(prepared, steel.Fy)
-  const mode = governingMode(bucklingModes(section, input))
-  const nominal = nominalCompression(section, mode, E_AISC, steel.Fy)
+  const Fn = nominalStress(steel.Fy, lowestStress(section, input))
+  const nominal = nominalCompression(section, { Fn }, E_AISC, steel.Fy)
   const capacity = available(nominal, FACTORS.compression, terms.method)
   const tension = availableTension(steel.Fy, steel.Fu, section.area, terms.method)
   const { compression, uplift } = demandOf(prepared, section.mass)
   const { bending } = prepared
   const bent =
     bending && screenBending(prepared, terms, bending, section, steel.Fy, { compression: capacity, tension })
-  return {
-    ...{ capacity, tension, compression, uplift, bent },
-    utilisation: Math.max(compression / capacity, uplift / tension, bent?.utilisation ?? 0),
-    slenderness: slendernessOf(prepared, section),
-  }
+  const utilisation = Math.max(compression / capacity, uplift / tension, bent?.utilisation ?? 0)
+  const slender = slendernessOf(prepared, section)
+  return { capacity, tension, compression, uplift, bent, utilisation, slenderness: slender }
 }
 
 function screenEn(prepared: PreparedColumn, section: Section, { Fy }: Pick<Steel, 'Fy'>): Screening {
   const capacity = governingModeEn(modesEn(section, Fy, lengthsOf(prepared))).resistance
   const tension = tensionEn(section.area, Fy)
   const { compression, uplift } = demandOf(prepared, section.mass)
-  return {
-    ...{ capacity, tension, compression, uplift, bent: undefined },
-    utilisation: Math.max(compression / capacity, uplift / tension),
-    slenderness: slendernessOf(prepared, section),
-  }
+  const utilisation = Math.max(compression / capacity, uplift / tension)
+  const slender = slendernessOf(prepared, section)
+  return { capacity, tension, compression, uplift, bent: undefined, utilisation, slenderness: slender }
 }
 
 /** Effective lengths that count, mm. */

@@ -61,3 +61,16 @@ export function governingMode(modes: readonly Mode[]): Mode {
 export function nominalCompression(section: Section, mode: Pick<Mode, 'Fn'>, E: number, Fy: number): number {
   return mode.Fn * effectiveArea(section, E, Fy, mode.Fn)
 }
+
+/** The lowest Fe of `bucklingModes`, without the modes. MPa. */
+export function lowestStress(section: Section, input: CompressionInput): number {
+  const { E, G, strong, weak, torsion, braceOffsets = [] } = input
+  const flexural = Math.min(
+    eulerStress(E, slenderness(strong, section.rx)),
+    eulerStress(E, slenderness(weak, section.ry)),
+  )
+  if (section.shape !== 'I') return flexural
+  let lowest = Math.min(flexural, torsionalStress(E, G, section, torsion))
+  for (const ya of braceOffsets) lowest = Math.min(lowest, constrainedAxisStress(E, G, section, torsion, ya))
+  return lowest
+}

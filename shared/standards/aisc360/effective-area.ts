@@ -1,7 +1,14 @@
 import type { RoundSection, Section } from '../../sections/section.ts'
 import { refuse } from '../../units/refusal.ts'
-import { effectiveWidth } from './effective-width.ts'
-import { flatElements, roundLimit, type Element } from './local-slenderness.ts'
+import { effectiveWidth, fullWidthLimit } from './effective-width.ts'
+import {
+  flatElements,
+  hssWallLimit,
+  rolledFlangeLimit,
+  roundLimit,
+  webLimit,
+  type Element,
+} from './local-slenderness.ts'
 
 /** (D/t)·(Fy/E) from which E7.2 gives no rule. */
 export const ROUND_RANGE = 0.45
@@ -49,8 +56,22 @@ export function flatEffectiveArea(
   )
 }
 
+/** Whether every flat element is fully effective under Fn: the common case, told without making a list of elements. */
+function isFull(section: Exclude<Section, RoundSection>, E: number, Fy: number, Fn: number): boolean {
+  if (section.shape === 'box') {
+    const full = fullWidthLimit(hssWallLimit(E, Fy), Fy, Fn)
+    return section.widthRatio <= full && section.depthRatio <= full
+  }
+  if (section.builtUp) return false
+  return (
+    section.flangeRatio <= fullWidthLimit(rolledFlangeLimit(E, Fy), Fy, Fn) &&
+    section.webRatio <= fullWidthLimit(webLimit(E, Fy), Fy, Fn)
+  )
+}
+
 /** Effective area of any shape under the nominal stress Fn, mm². E7. */
 export function effectiveArea(section: Section, E: number, Fy: number, Fn: number): number {
   if (section.shape === 'round') return roundEffectiveArea(section, E, Fy)
+  if (isFull(section, E, Fy, Fn)) return section.area
   return flatEffectiveArea(section.area, flatElements(section, E, Fy), Fy, Fn)
 }

@@ -92,29 +92,22 @@ function elementsOfI(section: ISection, E: number, Fy: number): Element[] {
 /** Flat elements of a section in uniform compression, with their limits; a round one has none. */
 export function flatElements(section: Exclude<Section, RoundSection>, E: number, Fy: number): Element[] {
   if (section.shape === 'I') return elementsOfI(section, E, Fy)
-  const common = {
-    limit: hssWallLimit(E, Fy),
-    coefficient: 1.4,
-    kc: null,
-    thickness: section.designWall,
-    count: 2,
-    ...C1_C2.hssWall,
-  }
+  const limit = hssWallLimit(E, Fy)
   const { widthRatio, depthRatio, designWall } = section
   return [
-    {
-      ...common,
-      name: 'wall across the width',
-      symbol: 'b/t',
-      ratio: widthRatio,
-      width: widthRatio * designWall,
-    },
-    {
-      ...common,
-      name: 'wall across the depth',
-      symbol: 'h/t',
-      ratio: depthRatio,
-      width: depthRatio * designWall,
-    },
+    wallElement('wall across the width', 'b/t', widthRatio, designWall, limit),
+    wallElement('wall across the depth', 'h/t', depthRatio, designWall, limit),
   ]
+}
+
+function wallElement(
+  name: Element['name'],
+  symbol: Element['symbol'],
+  ratio: number,
+  thickness: number,
+  limit: number,
+): Element {
+  const { c1, c2 } = C1_C2.hssWall
+  const width = ratio * thickness
+  return { name, symbol, ratio, limit, coefficient: 1.4, kc: null, width, thickness, count: 2, c1, c2 }
 }
