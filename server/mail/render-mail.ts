@@ -29,12 +29,22 @@ const FACE = 'Archivo, Arial, Helvetica, sans-serif'
 /** One letter, twice: the plain text says everything that the HTML says. Subjects are one line, whatever is in them. */
 export function renderMail(parts: MailParts): Mail {
   const subject = parts.subject.replaceAll(/\s+/g, ' ').trim()
-  return { subject, html: toHtml({ ...parts, subject }), text: toText(parts) }
+  return { subject, html: toHtml({ ...parts, subject }), text: toText({ ...parts, subject }) }
 }
 
-function toText({ shop, greeting, paragraphs, facts, action, listTitle, list = [] }: MailParts): string {
+function toText({
+  shop,
+  subject,
+  greeting,
+  paragraphs,
+  facts,
+  action,
+  listTitle,
+  list = [],
+}: MailParts): string {
   const width = Math.max(...facts.map(([name]) => name.length))
   const blocks = [
+    subject,
     `Dear ${greeting},`,
     ...paragraphs,
     facts.map(([name, value]) => `${name.padEnd(width)}  ${value}`).join('\n'),

@@ -87,7 +87,8 @@ async function deliver(deps: Deps, letter: OutboxTable): Promise<void> {
 
 async function send({ mailer, storage, config }: Deps, letter: OutboxTable): Promise<void> {
   const file = letter.attachment === null ? undefined : attachment.parse(JSON.parse(letter.attachment))
-  const { host } = new URL(config.publicUrl)
+  // Without the port: a colon may not stand there (RFC 5322, 3.6.4).
+  const { hostname } = new URL(config.publicUrl)
   await mailer.sendMail({
     from: config.mail.from,
     to: letter.toAddress,
@@ -95,7 +96,7 @@ async function send({ mailer, storage, config }: Deps, letter: OutboxTable): Pro
     html: letter.html,
     text: letter.text,
     // Fixed by the letter: one that was sent twice, because we died in between, is known as the same.
-    messageId: `<${letter.id}@${host}>`,
+    messageId: `<${letter.id}@${hostname}>`,
     headers: { 'Auto-Submitted': 'auto-generated' },
     ...(file
       ? {
