@@ -6,39 +6,49 @@ import { compressionChecks } from './compression-checks.ts'
 import { leastLeg } from './fillet.ts'
 import { enPlateChecks } from './en-plate.ts'
 import { findBase, wallOf } from './find-base.ts'
+import { roomChecks } from './room-checks.ts'
 import { rodChecks } from './rod-checks.ts'
-import { FEWEST_RODS, POST_WEIGHT } from './rods.ts'
+import { FEWEST_RODS, isPost } from './rods.ts'
 import { weldChecks } from './weld-checks.ts'
 
 const NOT_COVERED =
   'Concrete breakout, pull-out and shear at the anchor rods, and the footing itself, are not covered here: the engineer of record designs them.'
 
-/** Everything that cannot be taken, each with its field. */
-export function issuesOf({ section, required, concrete, plate, rods, stock }: BaseInput): Issue[] {
+/** Everything that cannot be taken, each with its field. What is merely too small is checked, and fails. */
+export function issuesOf({ required, concrete, plate = {}, rods = {}, stock }: BaseInput): Issue[] {
   const issues: Issue[] = []
   const say = (path: string, message: string) => issues.push({ path, message })
-  if (!(required.compression >= 0)) say('required.compression', 'newtons, 0 or more')
-  if (!(required.uplift >= 0)) say('required.uplift', 'newtons, 0 or more; uplift is positive here')
-  if (required.compression === 0 && required.uplift === 0) say('required', 'compression or uplift above 0')
-  if (!(concrete.strength > 0)) say('concrete.strength', 'cylinder strength in MPa, more than 0')
-  if (rods?.grade !== undefined && !rodSteel(rods.grade)) {
+  const positive = (path: string, value: number | undefined, message: string) => {
+    if (value !== undefined && !(Number.isFinite(value) && value > 0)) say(path, message)
+  }
+  const { compression, uplift } = required
+  if (!(Number.isFinite(compression) && compression >= 0)) say('required.compression', 'newtons, 0 or more')
+  if (!(Number.isFinite(uplift) && uplift >= 0)) {
+    say('required.uplift', 'newtons, 0 or more; uplift is positive here')
+  }
+  if (compression === 0 && uplift === 0) say('required', 'compression or uplift above 0')
+  positive('concrete.strength', concrete.strength, 'cylinder strength in MPa, more than 0')
+  positive('concrete.pier.length', concrete.pier?.length, 'mm, more than 0')
+  positive('concrete.pier.width', concrete.pier?.width, 'mm, more than 0')
+  positive('plate.length', plate.length, 'mm, more than 0')
+  positive('plate.width', plate.width, 'mm, more than 0')
+  positive('plate.thickness', plate.thickness, 'mm, more than 0')
+  positive('plate.yield', plate.yield, 'yield strength in MPa, more than 0')
+  positive('rods.diameter', rods.diameter, 'mm, more than 0')
+  if (rods.count !== undefined && !(Number.isInteger(rods.count) && rods.count >= 1)) {
+    say('rods.count', 'a whole number of at least 1')
+  }
+  if (rods.grade !== undefined && !rodSteel(rods.grade)) {
     say('rods.grade', 'F1554-36, F1554-55 or F1554-105')
   }
   if (stock.thicknesses.length === 0) say('stock.thicknesses', 'at least one plate thickness')
-  const size = { length: plate?.length, width: plate?.width }
-  if (size.length !== undefined && size.length < section.depth) {
-    say('plate.length', `at least the depth of ${section.designation}, ${Math.ceil(section.depth)} mm`)
-  }
-  if (size.width !== undefined && size.width < section.width) {
-    say('plate.width', `at least the width of ${section.designation}, ${Math.ceil(section.width)} mm`)
-  }
-  const { pier } = concrete
-  if (pier && (pier.length < section.depth || pier.width < section.width)) {
-    say('concrete.pier', `at least as large as ${section.designation}`)
-  } else if (pier && ((size.length ?? 0) > pier.length || (size.width ?? 0) > pier.width)) {
-    say('concrete.pier', 'at least as large as the plate')
-  }
+  if (stock.rodDiameters.length === 0) say('stock.rodDiameters', 'at least one rod')
   return issues
+}
+
+/** Rods and weld under EN are checked by AISC 360, LRFD. */
+export function methodOf({ standard, method = 'LRFD' }: BaseInput): Method {
+  return standard === 'EN 1993-1-1' ? 'LRFD' : method
 }
 
 function notesOf(parts: BaseParts, { standard, section, required, weight }: BaseInput): string[] {
@@ -50,8 +60,10 @@ function notesOf(parts: BaseParts, { standard, section, required, weight }: Base
       'Compression goes into the plate by bearing of the sawn end of the shaft; the weld holds it in place.',
     )
   }
-  if (weight !== undefined && weight <= POST_WEIGHT) {
-    notes.push('It weighs 300 lb or less: by 29 CFR 1926.751 it is a post, and need not have four rods.')
+  if (isPost(weight)) {
+    notes.push(
+      'It weighs 300 lb or less: by 29 CFR 1926.751 it is a post, and 1926.755(a) asks neither four rods nor the erection load of it.',
+    )
   }
   const { count } = parts.rods
   if (count >= FEWEST_RODS) {
@@ -69,18 +81,19 @@ function notesOf(parts: BaseParts, { standard, section, required, weight }: Base
 
 /**
  * Base plate, anchor rods and weld of a column in simple framing: bearing J8, plate by Design Guide 1, four rods and the
- * erection load of 29 CFR 1926.755, fillet J2; under EN the plate by EN 1993-1-8 6.2.5. What is given is checked, the rest is found. Refuses by field.
+ * erection load of 29 CFR 1926.755, fillet J2; under EN the plate by EN 1993-1-8 6.2.5. What is given is checked as it is,
+ * the rest is found. N, mm, MPa. Refuses by field.
  */
 export function designBase(input: BaseInput): BaseDesign {
   const issues = issuesOf(input)
   if (issues.length > 0) throw new Refusal(issues)
-  const method: Method = input.method ?? 'LRFD'
+  const method = methodOf(input)
   const parts = findBase(input, method)
   const compression =
     input.standard === 'EN 1993-1-1' ? enPlateChecks(input, parts) : compressionChecks(input, parts, method)
   const rods = rodChecks(input, parts, method)
   const welds = weldChecks(input, parts, method)
-  const checks = [...compression.checks, ...rods.checks, ...welds.checks]
+  const checks = [...roomChecks(input, parts), ...compression.checks, ...rods.checks, ...welds.checks]
   return {
     verdict: checks.every(({ utilisation }) => utilisation <= 1) ? 'holds' : 'fails',
     plate: parts.plate,

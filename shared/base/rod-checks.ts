@@ -6,15 +6,8 @@ import { makeStep } from '../units/render.ts'
 import type { Check, Quantity, Step } from '../units/step.ts'
 import type { BaseInput, BaseParts } from './base-design.ts'
 import { upliftThickness } from './cantilever.ts'
-import {
-  erectionMoment,
-  erectionTension,
-  FEWEST_RODS,
-  POST_WEIGHT,
-  rodArea,
-  rodAvailable,
-  rodNominal,
-} from './rods.ts'
+import { erectionChecks, worstErection } from './erection.ts'
+import { erectionMoment, isPost, rodArea, rodAvailable, rodNominal } from './rods.ts'
 
 const mm = (value: number): Quantity => ({ value, unit: 'mm' })
 const newtons = (value: number): Quantity => ({ value, unit: 'N' })
@@ -33,10 +26,9 @@ export function rodChecks(input: BaseInput, parts: BaseParts, method: Method): F
   const capacity = rodAvailable(Fu, rods.diameter, method)
   const worst = worstErection(section, parts)
   const steps = rodSteps(Fu, rods.diameter, method)
-  const isPost = weight !== undefined && weight <= POST_WEIGHT
   const checks: Check[] = []
-  if (!isPost && rods.count < FEWEST_RODS) checks.push(countCheck(rods.count))
-  checks.push(worst ? erectionCheck(worst, capacity, steps) : noRoom(section.designation))
+  if (rods.positions.length === 0) checks.push(noRoom(section.designation))
+  if (!isPost(weight)) checks.push(...erectionChecks(rods, worst, capacity, steps))
   const share = required.uplift / rods.count
   if (required.uplift > 0) checks.push(upliftCheck(required.uplift, rods.count, capacity, steps))
   const pulled = upliftThickness(share, plate.yield, method)
@@ -45,51 +37,10 @@ export function rodChecks(input: BaseInput, parts: BaseParts, method: Method): F
     checks,
     values: {
       rodAvailable: capacity,
-      erectionMoment: worst?.moment ?? erectionMoment(section.depth),
+      erectionMoment: erectionMoment(Math.max(section.depth, section.width)),
       ...(worst ? { erectionRodTension: worst.tension } : {}),
       ...(required.uplift > 0 ? { upliftPerRod: share, upliftThickness: pulled } : {}),
     },
-  }
-}
-
-export interface Erection {
-  moment: number
-  spacing: number
-  onSide: number
-  tension: number
-}
-
-/** The erection load each way; the way that pulls a rod the most. Undefined where no rod has room. */
-export function worstErection(
-  { depth, width }: BaseInput['section'],
-  { rods }: BaseParts,
-): Erection | undefined {
-  if (rods.positions.length === 0) return undefined
-  const about = (axis: 0 | 1, size: number): Erection => {
-    const at = rods.positions.map((position) => position[axis])
-    const [low, high] = [Math.min(...at), Math.max(...at)]
-    const onSide = Math.min(
-      at.filter((one) => one < low + 1).length,
-      at.filter((one) => one > high - 1).length,
-    )
-    const moment = erectionMoment(size)
-    const spacing = high - low
-    return { moment, spacing, onSide, tension: erectionTension(moment, onSide, spacing) }
-  }
-  const [along, across] = [about(0, depth), about(1, width)]
-  return along.tension >= across.tension ? along : across
-}
-
-function countCheck(count: number): Check {
-  return {
-    clause: '1926.755(a)',
-    title: 'Number of anchor rods',
-    demand: FEWEST_RODS,
-    capacity: count,
-    unit: '1',
-    utilisation: FEWEST_RODS / count,
-    steps: [],
-    notes: ['At least four in every column: OSHA 29 CFR 1926.755(a)(1).'],
   }
 }
 
@@ -103,29 +54,6 @@ function noRoom(designation: string): Check {
     utilisation: 2,
     steps: [],
     notes: [`Washers and wrench have no room beside ${designation}: a larger plate or smaller rods.`],
-  }
-}
-
-function erectionCheck({ moment, spacing, onSide, tension }: Erection, capacity: number, rod: Step[]): Check {
-  return {
-    clause: '1926.755(a)',
-    title: 'Erection load on the anchor rods',
-    demand: tension,
-    capacity,
-    unit: 'N',
-    utilisation: tension / capacity,
-    steps: [
-      makeStep({
-        symbol: 'T',
-        expression: 'M / (n · s), M of 300 lb at 18 in from the face',
-        template: `{0} / (${onSide} · {1})`,
-        terms: [{ value: moment, unit: 'N·mm' }, mm(spacing)],
-        value: tension,
-        unit: 'N',
-      }),
-      ...rod,
-    ],
-    notes: ['Unfactored, without help from the weight of the column: OSHA 29 CFR 1926.755(a)(2).'],
   }
 }
 

@@ -23,6 +23,11 @@ const ERECTION_REACH = 18 * MM_PER_INCH
 /** A post is a vertical member that weighs no more than this, and is not a column by 29 CFR 1926.751. N. */
 export const POST_WEIGHT = 300 * N_PER_LB
 
+/** Not a column, so that neither four rods nor the erection load are asked of it. Of unknown weight: a column. */
+export function isPost(weight: number | undefined): boolean {
+  return weight !== undefined && weight <= POST_WEIGHT
+}
+
 /** Moment of the erection load about the centre of a column of this depth (or width), N·mm. Unfactored. */
 export function erectionMoment(depth: number): number {
   return ERECTION_LOAD * (ERECTION_REACH + depth / 2)

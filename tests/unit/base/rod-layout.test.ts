@@ -24,15 +24,16 @@ function distance([along, across]: Place, section: Section): number {
   )
 }
 
-function hasRoom(section: Section, plate: { length: number; width: number }, places: readonly Place[]) {
+/** Whether washers lie on the plate beside the weld, and holes within it. */
+function hasRoom(section: Section, plate: { length: number; width: number }, places: readonly Place[] = []) {
   const { washer, hole } = rodRoom(ROD)
-  for (const place of places) {
-    const [along, across] = place
-    // The washer lies on the plate beside the weld, and the hole within it.
-    expect(distance(place, section)).toBeGreaterThanOrEqual(washer / 2 + LEG)
-    expect(plate.length / 2 - Math.abs(along)).toBeGreaterThanOrEqual(Math.max(washer, hole) / 2 - 1e-6)
-    expect(plate.width / 2 - Math.abs(across)).toBeGreaterThanOrEqual(Math.max(washer, hole) / 2 - 1e-6)
-  }
+  const edge = Math.max(washer, hole) / 2 - 1e-6
+  return places.every(
+    ([along, across]) =>
+      distance([along, across], section) >= washer / 2 + LEG &&
+      plate.length / 2 - Math.abs(along) >= edge &&
+      plate.width / 2 - Math.abs(across) >= edge,
+  )
 }
 
 describe('rods in a plate', () => {
@@ -42,7 +43,7 @@ describe('rods in a plate', () => {
       const plate = { length: upToModule(length), width: upToModule(width) }
       const places = layOutRods(section, plate, { count: 4, diameter: ROD }, LEG)
       expect(places).toHaveLength(4)
-      hasRoom(section, plate, places ?? [])
+      expect(hasRoom(section, plate, places), section.designation).toBe(true)
     }
   })
 
@@ -57,7 +58,7 @@ describe('rods in a plate', () => {
       [1, -1],
       [1, 1],
     ])
-    hasRoom(section, plate, places ?? [])
+    expect(hasRoom(section, plate, places), section.designation).toBe(true)
   })
 
   it('stand between the flanges, beside the web, where a plate is hardly larger than an I', () => {
@@ -66,7 +67,7 @@ describe('rods in a plate', () => {
     const places = layOutRods(section, plate, { count: 4, diameter: ROD }, LEG)
     expect(places).toHaveLength(4)
     for (const [along] of places ?? []) expect(Math.abs(along)).toBeLessThan(section.depth / 2)
-    hasRoom(section, plate, places ?? [])
+    expect(hasRoom(section, plate, places), section.designation).toBe(true)
   })
 
   it.each([
@@ -77,12 +78,17 @@ describe('rods in a plate', () => {
     expect(layOutRods(sectionCalled(name), plate, { count, diameter: ROD }, LEG)).toBeUndefined()
   })
 
-  it.each([4, 5, 6, 8, 12])('are as many as asked: %d, washers apart, on the plate made for them', (count) => {
-    const section = sectionCalled('W12X65')
-    const plate = leastPlate(section, ROD, LEG, Math.ceil(count / 2))
-    const places = layOutRods(section, plate, { count, diameter: ROD }, LEG) ?? []
-    expect(places).toHaveLength(count)
-    const apart = places.flatMap(([x, y], i) => places.slice(i + 1).map(([u, v]) => Math.hypot(x - u, y - v)))
-    expect(Math.min(...apart)).toBeGreaterThanOrEqual(rodRoom(ROD).washer)
-  })
+  it.each([4, 5, 6, 8, 12])(
+    'are as many as asked: %d, washers apart, on the plate made for them',
+    (count) => {
+      const section = sectionCalled('W12X65')
+      const plate = leastPlate(section, ROD, LEG, Math.ceil(count / 2))
+      const places = layOutRods(section, plate, { count, diameter: ROD }, LEG) ?? []
+      expect(places).toHaveLength(count)
+      const apart = places.flatMap(([x, y], i) =>
+        places.slice(i + 1).map(([u, v]) => Math.hypot(x - u, y - v)),
+      )
+      expect(Math.min(...apart)).toBeGreaterThanOrEqual(rodRoom(ROD).washer)
+    },
+  )
 })
