@@ -1,12 +1,8 @@
 import { steelFor } from '../materials/steel-for.ts'
-import { E_AISC, type Steel } from '../materials/steel.ts'
+import type { Steel } from '../materials/steel.ts'
 import { barPriceOf, type PriceBook } from '../pricing/price-book.ts'
 import type { Family, Section } from '../sections/section.ts'
 import type { PreparedColumn } from '../standards/prepare-column.ts'
-import { roundRange } from '../standards/aisc360/effective-area.ts'
-import { boxLimits } from '../standards/aisc360/flexure-hss.ts'
-import { webFlexureLimit } from '../standards/aisc360/flexure-i.ts'
-import { classOf } from '../standards/en1993/classification.ts'
 import { familiesOf } from '../standards/families.ts'
 import { screenColumn, type Screening } from '../standards/screen-column.ts'
 import { Refusal } from '../units/refusal.ts'
@@ -57,24 +53,20 @@ export function stockOf(sections: readonly Section[], grade: LineAsked['grade'])
 export function screenStock(prepared: PreparedColumn, stock: readonly Stocked[]): Candidate[] {
   const candidates: Candidate[] = []
   for (const { section, steel } of stock) {
-    if (!isCovered(prepared, section, steel.Fy)) continue
-    candidates.push({ section, steel, screening: screenColumn(prepared, section, steel) })
+    const screening = screeningOf(prepared, section, steel)
+    if (screening) candidates.push({ section, steel, screening })
   }
   return candidates
 }
 
-/** Whether the clauses that are here cover a shape: E7.2 and chapter F, or round shapes below class 4. */
-function isCovered({ terms, bending }: PreparedColumn, section: Section, Fy: number): boolean {
-  if (terms.standard === 'EN 1993-1-1') return section.shape !== 'round' || classOf(section, Fy) < 4
-  if (section.shape === 'round' && section.diameterRatio >= roundRange(E_AISC, Fy)) return false
-  return bending === undefined || coversFlexure(section, Fy)
-}
-
-/** Chapter F as far as it is here: webs that are compact (I) or not slender (HSS). */
-function coversFlexure(section: Section, Fy: number): boolean {
-  if (section.shape === 'I') return section.webRatio <= webFlexureLimit(E_AISC, Fy)
-  if (section.shape === 'round') return true
-  return Math.max(section.widthRatio, section.depthRatio) <= boxLimits(E_AISC, Fy).webSlender
+/** Undefined where the clauses refuse the shape: too slender for them, or without a buckling curve. */
+function screeningOf(prepared: PreparedColumn, section: Section, steel: Steel): Screening | undefined {
+  try {
+    return screenColumn(prepared, section, steel)
+  } catch (error) {
+    if (error instanceof Refusal && error.issues.every(({ path }) => path === 'section')) return undefined
+    throw error
+  }
 }
 
 /** The limits that a shape does not keep. */
