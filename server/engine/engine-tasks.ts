@@ -1,12 +1,16 @@
 import { catalogue } from '../../seeds/reference/catalogue.ts'
 import { designBase } from '../../shared/base/design-base.ts'
-import type { BodyOf } from '../../shared/contracts/operations.ts'
+import type { BodyOf, QueryOf } from '../../shared/contracts/operations.ts'
 import type { ProposalAnswerDto } from '../../shared/contracts/proposals.ts'
+import type { CapacityDto } from '../../shared/contracts/sections.ts'
 import type { RequestDto } from '../../shared/contracts/requests.ts'
 import type { LineRequirement } from '../../shared/contracts/requirement.ts'
 import { steelFor } from '../../shared/materials/steel-for.ts'
 import type { PriceBook } from '../../shared/pricing/price-book.ts'
+import { capacityCurve } from '../../shared/proposal/capacity-curve.ts'
+import { scheduler, type ScheduleRow } from '../../shared/proposal/propose-schedule.ts'
 import { propose } from '../../shared/proposal/propose.ts'
+import { EU_FAMILIES } from '../../shared/sections/catalogue.ts'
 import type { Section } from '../../shared/sections/section.ts'
 import { checkColumn } from '../../shared/standards/check-column.ts'
 import { prepareColumn } from '../../shared/standards/prepare-column.ts'
@@ -36,8 +40,11 @@ function basePlate({ body, book }: { body: BodyOf<'designBasePlate'>; book: Pric
   })
 }
 
+type ScheduleBody = Extract<BodyOf<'propose'>, unknown[]>
+export type ProposalBody = Exclude<BodyOf<'propose'>, unknown[]>
+
 interface ToPropose {
-  body: BodyOf<'propose'>
+  body: ProposalBody
   book: PriceBook
   tax: { rate: string; exempt: boolean }
 }
@@ -46,6 +53,37 @@ function proposeOne({ body, book, tax }: ToPropose): ProposalAnswerDto {
   const { delivery, section, ...asked } = body
   const terms = delivery && delivery.km > 0 ? { km: delivery.km } : null
   return propose({ asked, catalogue, book, delivery: terms, tax, section })
+}
+
+/** A part of a schedule. */
+function schedule({ lines, book }: { lines: ScheduleBody; book: PriceBook }): ScheduleRow[] {
+  const offer = scheduler(catalogue, book)
+  return lines.map(({ delivery, section: _, ...asked }) =>
+    offer({ asked, delivery: delivery && delivery.km > 0 ? { km: delivery.km } : null }),
+  )
+}
+
+const CURVE_POINTS = 61
+
+function capacity({
+  designation,
+  query,
+}: {
+  designation: string
+  query: QueryOf<'readCapacity'>
+}): CapacityDto {
+  const section = sectionOf(designation)
+  const { method, to, grade } = query
+  const standard = query.standard ?? (EU_FAMILIES.includes(section.family) ? 'EN 1993-1-1' : 'AISC 360-22')
+  const steel = steelFor(grade, section)
+  const points = capacityCurve(section, steel, { standard, method }, to, CURVE_POINTS)
+  return {
+    section: section.designation,
+    standard,
+    method: standard === 'EN 1993-1-1' ? '' : method,
+    steel: steel.title,
+    points,
+  }
 }
 
 type Offer = RequestDto['lines'][number]['offered']
@@ -67,6 +105,15 @@ function offer({ requirements, book }: { requirements: LineRequirement[]; book: 
 }
 
 /** What the engine does for the server, by name: plain values in, plain values out. */
-export const engineTasks = { check, basePlate, propose: proposeOne, offer, beginWork, workOut }
+export const engineTasks = {
+  check,
+  basePlate,
+  propose: proposeOne,
+  schedule,
+  capacity,
+  offer,
+  beginWork,
+  workOut,
+}
 export type EngineTasks = typeof engineTasks
 export type TaskName = keyof EngineTasks

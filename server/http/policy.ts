@@ -22,6 +22,7 @@ export const policy = {
   propose: SIGNED_IN,
   listSections: SIGNED_IN,
   readSection: SIGNED_IN,
+  readCapacity: SIGNED_IN,
 
   listRequests: ['contractor', ...ESTIMATING],
   createRequest: ['contractor'],

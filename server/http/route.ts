@@ -15,6 +15,7 @@ import { sendFile, type FileAnswer } from './file-answer.ts'
 import { answerOnce, onceFor, repeatable, type Once } from './once.ts'
 import { principalFor } from './read-principal.ts'
 import type { Principal } from './principal.ts'
+import { STREAMED, type Streamed } from './stream-lines.ts'
 import { issuesOf } from './problem.ts'
 
 export interface Call<Id extends OperationId> {
@@ -29,7 +30,7 @@ export interface Call<Id extends OperationId> {
   res: Response
 }
 
-type Answer<Id extends OperationId> = AnswerOf<Id> extends never ? FileAnswer : AnswerOf<Id>
+type Answer<Id extends OperationId> = (AnswerOf<Id> extends never ? FileAnswer : AnswerOf<Id>) | Streamed
 
 /**
  * Puts one operation of the contracts behind its rights, its schemas and its manners. The handler unpacks, calls one
@@ -60,6 +61,7 @@ export function route<Id extends OperationId>(
         res,
       })
     const answer = call ? await answerOnce(deps.db, call, doIt) : await doIt()
+    if (answer === STREAMED) return
     if (operation.answer === 'file') sendFile(res, answer as FileAnswer)
     else if (operation.status === 204) res.status(204).end()
     else res.status(operation.status ?? 200).json(operation.answer.parse(answer))

@@ -4,7 +4,7 @@ import { auditAnswer, auditQuery, priceBookAnswer } from './admin.ts'
 import { basePlateAnswer, basePlateBody, checkBody, columnCheck } from './checks.ts'
 import { byId, nothing, pageOf, pageQuery } from './common.ts'
 import { checkoutAnswer, orderDto, ordersQuery, orderSummary } from './orders.ts'
-import { proposalAnswer, proposalBody } from './proposals.ts'
+import { proposalAnswer, proposalBody, scheduleBody } from './proposals.ts'
 import {
   acceptAnswer,
   acceptBody,
@@ -16,7 +16,14 @@ import {
   revisionBody,
 } from './quotes.ts'
 import { reasonBody, requestBody, requestDto, requestsQuery, requestSummary } from './requests.ts'
-import { sectionDetail, sectionsQuery, sectionSummary } from './sections.ts'
+import {
+  bySection,
+  capacityAnswer,
+  capacityQuery,
+  sectionDetail,
+  sectionsQuery,
+  sectionSummary,
+} from './sections.ts'
 import { personRow, sessionAnswer, signInBody } from './session.ts'
 
 /** One operation of the API: the same schemas validate on the server, parse in the client and make the OpenAPI page. */
@@ -70,8 +77,8 @@ export const operations = define({
   propose: {
     method: 'post',
     path: '/api/proposals',
-    summary: 'Propose a shape and its price',
-    body: proposalBody,
+    summary: 'Propose a shape and its price; for a list of lines, a stream of one JSON object a line',
+    body: z.union([scheduleBody, proposalBody]),
     answer: proposalAnswer,
   },
   listSections: {
@@ -85,8 +92,16 @@ export const operations = define({
     method: 'get',
     path: '/api/sections/:designation',
     summary: 'One shape',
-    params: z.strictObject({ designation: z.string().min(1).max(80) }),
+    params: bySection,
     answer: sectionDetail,
+  },
+  readCapacity: {
+    method: 'get',
+    path: '/api/sections/:designation/capacity',
+    summary: 'Available strength against length',
+    params: bySection,
+    query: capacityQuery,
+    answer: capacityAnswer,
   },
 
   listRequests: {

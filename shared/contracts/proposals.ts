@@ -31,6 +31,10 @@ export const proposal = z.object({
   alternatives: z.array(alternative),
   /** Why the next lighter shape does not do. */
   nextLighter: z.object({ section: z.string(), reason: z.string() }).nullable(),
+  /** What would make it cheaper, the largest saving first: changes that the customer could make. */
+  advice: z
+    .array(z.object({ change: z.string(), section: z.string(), saves: money, unitPrice: money }))
+    .default([]),
   /** Of this line alone; tax and delivery as for a quote of one line. */
   price: pricedQuote,
 })
@@ -47,6 +51,19 @@ export const proposalBody = lineRequirement.extend({
   /** Another shape than the cheapest: the one to propose. */
   section: z.string().trim().min(1).max(60).optional(),
 })
+/** A schedule: many lines at once, answered as a stream, one JSON object a line. */
+export const scheduleBody = z.array(proposalBody).min(1).max(1000)
+/** One line of that stream: how far it has come, and what is offered for the mark or why nothing is. */
+export const scheduleRow = z.object({
+  index: z.int(),
+  of: z.int(),
+  mark: z.string(),
+  offered: z
+    .object({ section: z.string(), utilisation: z.number(), unitPrice: money, linePrice: money })
+    .nullable(),
+  reason: z.string().nullable(),
+})
+export type ScheduleRowDto = z.infer<typeof scheduleRow>
 export const proposalAnswer = z.discriminatedUnion('found', [proposal, noProposal])
 export type ProposalDto = z.infer<typeof proposal>
 export type ProposalAnswerDto = z.infer<typeof proposalAnswer>

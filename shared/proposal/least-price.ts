@@ -25,35 +25,52 @@ function seller({ book, delivery }: PriceTerms, quantity: number): (piece: numbe
   return (piece) => (piece * quantity + fixed) * factor
 }
 
+/** Above this many pieces the last bar is taken as shared: its waste no longer tells. */
+const FEW = 40
+
 /**
- * Metres of bar that a piece of this length, mm, costs at the least: over every stock length and every number of pieces
- * from it, the bar less the worth of what is left, without kerf and trim. `scrap`: worth of scrap as a share of price.
+ * Metres of bar that so many pieces of a length, mm, cost at the least: over every stock length and every number of
+ * pieces from a bar, the bar less the worth of what is left, without kerf and trim. `scrap`: worth of scrap as a share.
  */
-function leastBar(
+function leastBars(
   stockLengths: readonly number[],
   cutting: PriceBook['cutting'],
   length: number,
+  quantity: number,
   scrap: number,
 ): number {
-  const worth = Number(cutting.remnantWorth)
-  let least = Infinity
+  const worth = Math.max(Number(cutting.remnantWorth), scrap)
+  // What a bar comes to from which so many pieces are cut, at the least.
+  const bars: number[] = []
   for (const bar of stockLengths) {
     for (let pieces = 1; pieces * length <= bar; pieces += 1) {
       const left = bar - pieces * length
-      const net = bar - left * (left >= cutting.reusableLength ? Math.max(worth, scrap) : scrap)
-      least = Math.min(least, net / pieces)
+      const net = bar - left * (left >= cutting.reusableLength ? worth : scrap)
+      bars[pieces] = Math.min(bars[pieces] ?? Infinity, net)
     }
   }
   // Longer than every bar: it has no price, and any bound will do.
-  return (Number.isFinite(least) ? least : length) / 1000
+  if (bars.length === 0) return (length * quantity) / 1000
+  const each = bars.reduce((least, net, pieces) => Math.min(least, net / pieces), Infinity)
+  if (quantity > FEW) return (each * quantity) / 1000
+  const total = [0]
+  for (let count = 1; count <= quantity; count += 1) {
+    let least = Infinity
+    for (let pieces = 1; pieces < bars.length && pieces <= count; pieces += 1) {
+      least = Math.min(least, (bars[pieces] ?? Infinity) + (total[count - pieces] ?? Infinity))
+    }
+    total[count] = least
+  }
+  return (total[quantity] ?? 0) / 1000
 }
 
-/** What a metre of the shaft at this length costs for each kg that it weighs: price and bars of its family. */
-function shaftRate(book: PriceBook, family: Family, length: number): number {
+/** What the shafts of a line cost for each kg/m of theirs: price and bars of the family. */
+function shaftRate(book: PriceBook, family: Family, length: number, quantity: number): number {
   const bar = barPriceOf(book, family)
   if (!bar || length <= 0) return 0
   const price = Number(bar.pricePerKg)
-  return price * leastBar(bar.stockLengths, book.cutting, length, Number(book.cutting.scrapPerKg) / price)
+  const scrap = Number(book.cutting.scrapPerKg) / price
+  return price * leastBars(bar.stockLengths, book.cutting, length, quantity, scrap)
 }
 
 function linear({ a, b }: LinearMinutes, x: number): number {
@@ -88,7 +105,7 @@ export function leastByShape(terms: PriceTerms, asked: LineAsked): (section: Sec
   const rateOf = (family: Family) => {
     const known = rates.get(family)
     if (known !== undefined) return known
-    const rate = shaftRate(book, family, length * 1000)
+    const rate = shaftRate(book, family, length * 1000, asked.quantity) / asked.quantity
     rates.set(family, rate)
     return rate
   }
@@ -114,12 +131,21 @@ export function leastByWork(terms: PriceTerms, spec: LineSpec, section: Section)
   )
   const mass = length * section.mass + plateMass
   const material =
-    section.mass * shaftRate(book, section.family, length * 1000) +
+    (section.mass * shaftRate(book, section.family, length * 1000, spec.quantity)) / spec.quantity +
     plateMass * (1 + Number(book.plate.waste)) * Number(book.plate.pricePerKg) +
     (spec.rods ? spec.rods.count * Number(rodPriceOf(book, spec.rods.diameter)?.each ?? 0) : 0)
   const labour = (minutesOf(book, spec, section, plates, mass) / 60) * Number(book.shopRatePerHour)
-  const piece = material + labour + finishOf(book, spec, section, plates, length, mass)
+  const finish = Math.max(finishOf(book, spec, section, plates, length, mass), leastFinish(book, spec))
+  const piece = material + labour + finish
   return seller(terms, spec.quantity)(piece)
+}
+
+/** The order's least charge for finishing, for each piece. */
+function leastFinish(
+  { finish }: PriceBook,
+  { finish: asked, quantity }: Pick<LineSpec, 'finish' | 'quantity'>,
+): number {
+  return asked === 'none' ? 0 : Number(finish.minimumPerOrder) / quantity
 }
 
 function minutesOf(

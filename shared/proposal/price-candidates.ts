@@ -98,3 +98,17 @@ export function cheapest(
   }
   return best
 }
+
+/** The one with the least measure of those that can be made and priced. */
+export function leastPriced(
+  asked: LineAsked,
+  candidates: readonly Candidate[],
+  terms: PriceTerms,
+  measure: (candidate: Candidate) => number,
+): PricedCandidate | undefined {
+  for (const candidate of candidates.toSorted((a, b) => measure(a) - measure(b))) {
+    const priced = priceOne(asked, candidate, terms)
+    if (priced) return priced
+  }
+  return undefined
+}

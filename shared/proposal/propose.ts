@@ -11,6 +11,7 @@ import { checkColumn, type ColumnCheck } from '../standards/check-column.ts'
 import { checkFamily } from '../standards/families.ts'
 import { prepareColumn, type PreparedColumn } from '../standards/prepare-column.ts'
 import { Refusal, refuse, type Issue } from '../units/refusal.ts'
+import { adviceFor, type Advice } from './advice.ts'
 import { familiesFor, limitsBroken, screenStock, stockOf, type Candidate } from './candidates.ts'
 import { leastBy } from './least-by.ts'
 import type { LineAsked } from './line-asked.ts'
@@ -49,6 +50,7 @@ export interface Proposal {
   spec: LineSpec
   alternatives: Alternative[]
   nextLighter: NextLighter | null
+  advice: Advice[]
   price: PricedQuote
 }
 
@@ -105,11 +107,27 @@ export function propose(input: ProposalInput): Proposal | NoProposal {
     ...{ base, spec },
     alternatives: alternativesOf(ranked),
     nextLighter: nextLighter(asked, chosen, screened, ranked),
+    advice: ranked[0] ? adviceOf(input, ranked[0]) : [],
     price: priceQuote({
       ...{ book, delivery, lines: [{ spec, section }], discount: '0' },
       tax: input.tax ?? { rate: '0', exempt: false },
     }),
   }
+}
+
+/** Changes are weighed against the cheapest, whatever shape is looked at. */
+function adviceOf({ catalogue, book, delivery, asked }: ProposalInput, best: PricedCandidate): Advice[] {
+  const terms = { book, delivery }
+  return adviceFor(asked, best.price.delivered, terms, (changed) => {
+    const prepared = prepareColumn(changed)
+    const screened = screenStock(
+      prepared,
+      stockOf(catalogue.ofFamilies(familiesFor(changed, book)), changed.grade),
+    )
+    const holding = screened.filter((candidate) => limitsBroken(candidate, changed.limits).length === 0)
+    const [cheaper] = cheapest(changed, holding, terms, 1)
+    return cheaper && { section: cheaper.section.designation, ...cheaper.price }
+  })
 }
 
 /** The cheapest, and among them in their place the lightest and the slimmest. */

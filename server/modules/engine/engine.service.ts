@@ -1,6 +1,7 @@
 import type { AnswerOf, BodyOf, QueryOf } from '../../../shared/contracts/operations.ts'
-import type { ProposalAnswerDto } from '../../../shared/contracts/proposals.ts'
+import type { ProposalAnswerDto, ScheduleRowDto } from '../../../shared/contracts/proposals.ts'
 import type { Deps } from '../../deps.ts'
+import type { ProposalBody } from '../../engine/engine-tasks.ts'
 import { fail, notFound } from '../../errors.ts'
 import { isShop, personOf, type Principal } from '../../http/principal.ts'
 import { taxRateOf } from '../../shop.ts'
@@ -54,7 +55,7 @@ export async function designBasePlate(
 export async function propose(
   { engine, db, clock, shop }: Deps,
   principal: Principal,
-  body: BodyOf<'propose'>,
+  body: ProposalBody,
 ): Promise<ProposalAnswerDto> {
   checkGrade(principal, body)
   const { companyId } = personOf(principal)
@@ -66,4 +67,29 @@ export async function propose(
   })
   if (!answer.found || isShop(principal)) return answer
   return { ...answer, price: priceForCustomer(answer.price) }
+}
+
+/** Lines of a schedule that are worked out before the next progress is told. */
+const CHUNK = 50
+
+/** A schedule, part by part, so that the first answers come while the last are worked out. */
+export async function* proposeSchedule(
+  { engine, db, clock }: Deps,
+  principal: Principal,
+  lines: ProposalBody[],
+): AsyncGenerator<ScheduleRowDto> {
+  for (const line of lines) checkGrade(principal, line)
+  const book = await currentBook(db, clock())
+  for (let from = 0; from < lines.length; from += CHUNK) {
+    const rows = await engine.run('schedule', { lines: lines.slice(from, from + CHUNK), book })
+    for (const [at, row] of rows.entries()) yield { index: from + at, of: lines.length, ...row }
+  }
+}
+
+export function readCapacity(
+  { engine }: Deps,
+  designation: string,
+  query: QueryOf<'readCapacity'>,
+): Promise<AnswerOf<'readCapacity'>> {
+  return engine.run('capacity', { designation, query })
 }
