@@ -1,7 +1,9 @@
-import { moneyToDecimal } from '../pricing/money.ts'
+import type { CandidatePrice } from '../pricing/candidate.ts'
+import { moneyToDecimal, type Money } from '../pricing/money.ts'
 import { limitsBroken, type Candidate } from './candidates.ts'
+import { leastBy } from './least-by.ts'
 import type { LineAsked } from './line-asked.ts'
-import type { PricedCandidate } from './price-candidates.ts'
+import { priceOne, type PriceTerms } from './price-candidates.ts'
 import { percentText } from './words.ts'
 
 export interface NextLighter {
@@ -9,27 +11,29 @@ export interface NextLighter {
   reason: string
 }
 
+/** Undefined price: what was chosen by name cannot be made as it stands. */
+type Chosen = Candidate & { price?: CandidatePrice }
+
 /** The next lighter shape of the same family, and why it is not the one. */
 export function nextLighter(
-  { limits }: LineAsked,
-  chosen: Candidate,
+  asked: LineAsked,
+  chosen: Chosen,
   screened: readonly Candidate[],
-  ranked: readonly PricedCandidate[],
+  terms: PriceTerms,
 ): NextLighter | null {
   const { family, mass } = chosen.section
-  let next: Candidate | undefined
-  for (const one of screened) {
-    if (one.section.family !== family || one.section.mass >= mass) continue
-    if (!next || one.section.mass > next.section.mass) next = one
-  }
+  const lighter = screened.filter(({ section }) => section.family === family && section.mass < mass)
+  const next = leastBy(lighter, ({ section }) => mass - section.mass)
   if (!next) return null
-  return { section: next.section.designation, reason: reasonOf(next, limits, ranked) }
+  const reason = whyNot(next, asked.limits) ?? whatItCosts(asked, chosen, next, terms)
+  return { section: next.section.designation, reason }
 }
 
-function reasonOf(next: Candidate, limits: LineAsked['limits'], ranked: readonly PricedCandidate[]): string {
+/** The limit that it does not keep. */
+function whyNot(next: Candidate, limits: LineAsked['limits']): string | undefined {
+  const { section } = next
   const { utilisation, slenderness } = next.screening
   const [broken] = limitsBroken(next, limits)
-  const { section } = next
   switch (broken) {
     case 'utilisation':
       return utilisation > 1
@@ -41,12 +45,21 @@ function reasonOf(next: Candidate, limits: LineAsked['limits'], ranked: readonly
       return `it is ${section.depth.toFixed(0)} mm deep, over the limit`
     case 'width':
       return `it is ${section.width.toFixed(0)} mm wide, over the limit`
-    default: {
-      const priced = ranked.find((one) => one.section === section)
-      const at = priced
-        ? ` at ${priced.price.unitPrice.currency} ${moneyToDecimal(priced.price.unitPrice)}`
-        : ''
-      return `it holds too, and is no cheaper as delivered${at}`
-    }
+    case undefined:
+      return undefined
   }
+}
+
+function whatItCosts(asked: LineAsked, { price }: Chosen, next: Candidate, terms: PriceTerms): string {
+  const priced = priceOne(asked, next, terms)?.price
+  if (!priced) return 'it holds, but the shop has no base plate or no bar for it'
+  const each = `${inWords(priced.unitPrice)} each`
+  if (!price) return `it holds too, at ${each}`
+  return priced.delivered.amount < price.delivered.amount
+    ? `it holds too, and costs less: ${each}`
+    : `it holds too, and is no cheaper as delivered: ${each}`
+}
+
+function inWords(amount: Money): string {
+  return `${amount.currency} ${moneyToDecimal(amount)}`
 }

@@ -1,6 +1,8 @@
 import type { BaseDesign } from '../base/base-design.ts'
+import { steelFor } from '../materials/steel-for.ts'
 import { priceQuote } from '../pricing/build-up.ts'
 import type { LineSpec } from '../pricing/line-spec.ts'
+import type { CandidatePrice } from '../pricing/candidate.ts'
 import type { Money } from '../pricing/money.ts'
 import type { PriceBook } from '../pricing/price-book.ts'
 import type { PricedQuote } from '../pricing/priced-quote.ts'
@@ -10,6 +12,7 @@ import type { Section } from '../sections/section.ts'
 import { checkColumn, type ColumnCheck } from '../standards/check-column.ts'
 import { checkFamily } from '../standards/families.ts'
 import { prepareColumn, type PreparedColumn } from '../standards/prepare-column.ts'
+import { screenColumn } from '../standards/screen-column.ts'
 import { Refusal, refuse, type Issue } from '../units/refusal.ts'
 import { adviceFor, type Advice } from './advice.ts'
 import { familiesFor, limitsBroken, screenStock, stockOf, type Candidate } from './candidates.ts'
@@ -20,6 +23,7 @@ import { nothingFits, type NoProposal } from './nothing-fits.ts'
 import {
   baseOf,
   cheapest,
+  leastPriced,
   priceOne,
   specOf,
   type PricedCandidate,
@@ -89,7 +93,9 @@ export function propose(input: ProposalInput): Proposal | NoProposal {
   if (issues.length > 0) throw new Refusal(issues)
   const prepared = prepareColumn(asked)
   const families = familiesFor(asked, book)
-  if (families.length === 0) refuse('limits.families', 'at least one family that the shop buys')
+  if (families.length === 0) {
+    refuse('limits.families', `at least one family that the shop buys and ${prepared.terms.standard} is for`)
+  }
   const screened = screenStock(prepared, stockOf(catalogue.ofFamilies(families), asked.grade))
   const holding = screened.filter((candidate) => limitsBroken(candidate, asked.limits).length === 0)
   const terms = { book, delivery }
@@ -106,7 +112,7 @@ export function propose(input: ProposalInput): Proposal | NoProposal {
     check: checkColumn(prepared, section, steel),
     ...{ base, spec },
     alternatives: alternativesOf(ranked),
-    nextLighter: nextLighter(asked, chosen, screened, ranked),
+    nextLighter: nextLighter(asked, chosen, screened, terms),
     advice: ranked[0] ? adviceOf(input, ranked[0]) : [],
     price: priceQuote({
       ...{ book, delivery, lines: [{ spec, section }], discount: '0' },
@@ -132,22 +138,21 @@ function adviceOf({ catalogue, book, delivery, asked }: ProposalInput, best: Pri
 
 /** The cheapest, and among them in their place the lightest and the slimmest. */
 function rank(asked: LineAsked, holding: readonly Candidate[], terms: PriceTerms): PricedCandidate[] {
-  const best = cheapest(asked, holding, terms, SHOWN)
-  const extremes = [leastBy(holding, ({ section }) => section.mass), leastBy(holding, planArea)]
-  const more = extremes.flatMap((candidate) => {
-    if (!candidate || best.some(({ section }) => section === candidate.section)) return []
-    const priced = priceOne(asked, candidate, terms)
-    return priced ? [priced] : []
-  })
-  const all = [...best, ...more.filter((one, index) => more.findIndex((other) => same(one, other)) === index)]
-  return all.sort((a, b) => a.price.delivered.amount - b.price.delivered.amount)
+  const ranked = cheapest(asked, holding, terms, SHOWN)
+  // Where nothing can be made, these cannot either.
+  if (ranked.length === 0) return []
+  for (const measure of [shaftMass, planArea]) {
+    const least = leastPriced(asked, holding, terms, measure)
+    if (least && !ranked.some(({ section }) => section === least.section)) ranked.push(least)
+  }
+  return ranked.sort((a, b) => a.price.delivered.amount - b.price.delivered.amount)
 }
 
-const same = (a: Candidate, b: Candidate) => a.section === b.section
+const shaftMass = ({ section }: { section: Section }) => section.mass
 const planArea = ({ section }: { section: Section }) => section.depth * section.width
 
 function alternativesOf(ranked: readonly PricedCandidate[]): Alternative[] {
-  const lightest = leastBy(ranked, ({ section }) => section.mass)
+  const lightest = leastBy(ranked, shaftMass)
   const slimmest = leastBy(ranked, planArea)
   return ranked.map((one, index) => {
     const { designation, designationSI, family, mass, depth, width } = one.section
@@ -163,7 +168,7 @@ function alternativesOf(ranked: readonly PricedCandidate[]): Alternative[] {
   })
 }
 
-type Chosen = Candidate & { spec: LineSpec }
+type Chosen = Candidate & { spec: LineSpec; price?: CandidatePrice }
 
 /** A shape by its name, of any family that the shop buys: its verdict is the answer, whatever it is. */
 function chooseByName(
@@ -174,12 +179,8 @@ function chooseByName(
   const section = catalogue.find(name)
   if (!section) return refuse('section', `${name} is not in the catalogue; a designation such as W10X49`)
   checkFamily(section, prepared.terms.standard)
-  const [candidate] = screenStock(prepared, stockOf([section], asked.grade))
-  if (!candidate)
-    return refuse(
-      'section',
-      `${section.designation} is too slender for the clauses that are here; choose a thicker wall`,
-    )
+  const steel = steelFor(asked.grade, section)
+  const candidate = { section, steel, screening: screenColumn(prepared, section, steel) }
   const priced = priceOne(asked, candidate, terms)
   if (priced) return priced
   return { ...candidate, spec: specOf(asked, candidate, baseOf(asked, candidate, book)) }
