@@ -16,6 +16,7 @@ export function calculation(sheet: Sheet, line: QuoteLineDto, system: UnitSystem
   sheet.down(8)
   lengthTable(sheet, line.check, system)
   for (const check of line.check.checks) checkSteps(sheet, check, system)
+  braceNeeds(sheet, line.check, system)
   if (line.base) {
     sheet.down(6)
     sheet.heading(`Base plate of ${line.mark}`, 2, 120)
@@ -69,6 +70,30 @@ function lengthTable(sheet: Sheet, { lengths }: ColumnCheckDto, system: UnitSyst
   )
   sheet.down(3)
   sheet.paragraph(`Torsion: Lcz ${label(lengths.torsion.used)} between points that stop twist.`, 'reckonSoft')
+  sheet.down(8)
+}
+
+/** What each brace must give: the shape is only as good as its braces. */
+function braceNeeds(sheet: Sheet, { braces }: ColumnCheckDto, system: UnitSystem): void {
+  if (braces.length === 0) return
+  sheet.heading('What each brace must give', 3, 60)
+  table(
+    sheet,
+    [
+      { label: 'Brace at', share: 1, style: 'reckonStrong' },
+      { label: 'Holding', share: 1, style: 'reckon' },
+      { label: 'Strength', share: 1, align: 'right', style: 'reckon' },
+      { label: 'Stiffness', share: 1, align: 'right', style: 'reckon' },
+    ],
+    braces.map(({ height, axis, strength, stiffness }) => [
+      heightLabel(height, system),
+      `${axis} axis`,
+      formatQuantity(strength, 'N', system),
+      formatQuantity(stiffness, 'N/mm', system),
+    ]),
+  )
+  sheet.down(3)
+  sheet.paragraph('AISC 360 Appendix 6.2, point bracing, for the governing compression.', 'reckonSoft')
   sheet.down(8)
 }
 

@@ -143,6 +143,7 @@ export const columnCheck: ColumnCheckDto = {
     },
     torsion: { used: HEIGHT },
   },
+  braces: [{ height: BRACE, axis: 'weak', length: BRACE, strength: 12_500, stiffness: 6061 }],
   values: { required: 1_250_000 },
   checks: [flexural, slenderness],
   assumptions: ['Braces hold translation only and are taken as rigid (AISC 360 Appendix 6).'],

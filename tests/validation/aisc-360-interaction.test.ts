@@ -120,8 +120,8 @@ const CASES = [
   },
 ] as const
 
-function near(value: number | undefined, expected: number, tolerance = 1e-3): void {
-  expect(Math.abs((value ?? NaN) / expected - 1)).toBeLessThanOrEqual(tolerance)
+function near(value: unknown, expected: number, tolerance = 1e-3): void {
+  expect(Math.abs(Number(value) / expected - 1)).toBeLessThanOrEqual(tolerance)
 }
 
 function sectionOf(name: string) {
