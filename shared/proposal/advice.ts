@@ -4,7 +4,7 @@ import type { Axis, Ends } from '../stability/column.ts'
 import { Refusal } from '../units/refusal.ts'
 import { familiesFor } from './candidates.ts'
 import type { LineAsked } from './line-asked.ts'
-import type { PriceTerms } from './price-candidates.ts'
+import type { PriceTerms } from './price-terms.ts'
 
 export interface Advice {
   /** What the customer would change, in words. */

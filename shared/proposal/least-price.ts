@@ -2,7 +2,7 @@ import type { LineSpec, PlateSpec } from '../pricing/line-spec.ts'
 import { barPriceOf, rodPriceOf, type LinearMinutes, type PriceBook } from '../pricing/price-book.ts'
 import type { Family, Section } from '../sections/section.ts'
 import type { LineAsked } from './line-asked.ts'
-import type { PriceTerms } from './price-candidates.ts'
+import type { PriceTerms } from './price-terms.ts'
 
 /*
  * Lower bounds of what a line costs delivered, in units of currency and in plain numbers: every term stands in the price

@@ -3,7 +3,8 @@ import { moneyToDecimal, type Money } from '../pricing/money.ts'
 import { limitsBroken, type Candidate } from './candidates.ts'
 import { leastBy } from './least-by.ts'
 import type { LineAsked } from './line-asked.ts'
-import { priceOne, type PriceTerms } from './price-candidates.ts'
+import { priceOne } from './price-candidates.ts'
+import type { PriceTerms } from './price-terms.ts'
 import { percentText } from './words.ts'
 
 export interface NextLighter {

@@ -9,15 +9,11 @@ import { lineSpecOf, type ChosenBase } from '../quoting/defaults.ts'
 import type { Candidate } from './candidates.ts'
 import { leastByShape, leastByWork } from './least-price.ts'
 import type { LineAsked } from './line-asked.ts'
+import type { PriceTerms } from './price-terms.ts'
 
 export interface PricedCandidate extends Candidate {
   spec: LineSpec
   price: CandidatePrice
-}
-
-export interface PriceTerms {
-  book: PriceBook
-  delivery: { km: number } | null
 }
 
 /** How a candidate would be made; undefined where no base of it holds. */

@@ -20,15 +20,8 @@ import { leastBy } from './least-by.ts'
 import type { LineAsked } from './line-asked.ts'
 import { nextLighter, type NextLighter } from './next-lighter.ts'
 import { nothingFits, type NoProposal } from './nothing-fits.ts'
-import {
-  baseOf,
-  cheapest,
-  leastPriced,
-  priceOne,
-  specOf,
-  type PricedCandidate,
-  type PriceTerms,
-} from './price-candidates.ts'
+import { baseOf, cheapest, leastPriced, priceOne, specOf, type PricedCandidate } from './price-candidates.ts'
+import type { PriceTerms } from './price-terms.ts'
 
 export interface Alternative {
   section: string
