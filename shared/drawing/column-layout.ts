@@ -7,6 +7,8 @@ const FOOT_ROOM = 96
 const MARGIN = 34
 /** Room for a segment's length beside its dimension line. */
 const TEXT_ROOM = 52
+/** Where a view has its plumb line, as a part of what its text leaves: braces and their heights stand left of it. */
+const PLUMB = 0.67
 /** A shaft drawn narrower than this is no longer seen as two edges: it gets a width of its own and break lines. */
 const NARROWEST = 7
 const BROKEN_WIDTH = 11
@@ -50,7 +52,7 @@ export function layoutColumn({ columnHeight, depth, width, sheet }: LayoutInput)
   const foot = head + columnHeight * scale
   const at = (left: number, size: number) => {
     const dimension = left + view - TEXT_ROOM
-    return { x: left + (view - TEXT_ROOM) * 0.57, halfShaft: (size * across) / 2, dimension }
+    return { x: left + (view - TEXT_ROOM) * PLUMB, halfShaft: (size * across) / 2, dimension }
   }
   return {
     width: sheet.width,
