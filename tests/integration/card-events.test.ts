@@ -1,6 +1,9 @@
 import fc from 'fast-check'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
+import type { Deps } from '../../server/deps.ts'
+import { handleDueEvents } from '../../server/modules/payments/stripe-events.service.ts'
 import { CardDesk } from '../support/card-desk.ts'
+import { START } from '../support/test-app.ts'
 
 /* Events of the processor as they may come: twice, late, out of order, and with a crash in between. */
 
@@ -20,6 +23,21 @@ async function expectPaidOnce(orderId: string): Promise<void> {
   expect(order.progress.filter(({ status }) => status === 'released')).toHaveLength(1)
   expect(await desk.ledgerOf(orderId)).toEqual([-DUE, DUE])
   expect((await desk.lettersOf(orderId)).filter((kind) => kind === 'deposit receipt')).toHaveLength(1)
+}
+
+/** The processor answers how a card fared, and meanwhile something else happens. */
+function whileAsking(meanwhile: () => Promise<void>): Deps {
+  const { deps } = desk.app
+  const intents = deps.stripe.paymentIntents
+  const slow = Object.assign(Object.create(intents) as typeof intents, {
+    async retrieve(id: string) {
+      const asItWas = await intents.retrieve(id)
+      await meanwhile()
+      return asItWas
+    },
+  })
+  const stripe = Object.assign(Object.create(deps.stripe) as typeof deps.stripe, { paymentIntents: slow })
+  return { ...deps, stripe }
 }
 
 describe('an event of the processor', () => {
@@ -64,6 +82,39 @@ describe('an event of the processor', () => {
     expect(await desk.lettersOf(order)).toEqual(['payment failed'])
     expect(await desk.ledgerOf(order)).toEqual([])
     expect(await desk.pay(order)).toBe(session)
+  })
+
+  it('of a refused card, looked into while the next card went through, does not undo that', async () => {
+    const { deps } = desk.app
+    const order = await desk.order(DUE)
+    const session = await desk.pay(order)
+    desk.fake.pay(session, 'decline')
+    for (const event of desk.eventsOf(session)) await desk.deliverAndDie(event)
+    await handleDueEvents(
+      whileAsking(async () => {
+        desk.fake.pay(session, 'accept')
+        for (const event of desk.eventsOf(session)) await desk.deliverAndDie(event)
+        await handleDueEvents(deps)
+      }),
+    )
+    await expectPaidOnce(order)
+    expect(await desk.lettersOf(order)).toEqual(['deposit receipt'])
+  })
+
+  it('that two are at, because the first took too long, has one effect', async () => {
+    const { deps } = desk.app
+    const order = await desk.order(DUE)
+    const session = await desk.pay(order)
+    desk.fake.pay(session, 'decline')
+    for (const event of desk.eventsOf(session)) await desk.deliverAndDie(event)
+    await handleDueEvents(
+      whileAsking(async () => {
+        desk.app.setClock(new Date(Date.parse(START) + 60_000).toISOString())
+        await handleDueEvents(deps)
+      }),
+    )
+    desk.app.setClock(START)
+    expect(await desk.lettersOf(order)).toEqual(['payment failed'])
   })
 
   it('kept before a crash is acted on after it, once', async () => {

@@ -128,6 +128,16 @@ describe('a checkout that was left open too long', () => {
 })
 
 describe('the sweep', () => {
+  async function raised(action: string, session: string): Promise<number> {
+    const rows = await desk.app.deps.db
+      .selectFrom('audit')
+      .select('id')
+      .where('action', '=', action)
+      .where('after', 'like', `%${session}%`)
+      .execute()
+    return rows.length
+  }
+
   it('finds a payment of which no event came, once and no sooner than events take', async () => {
     const order = await desk.order(4200)
     const session = await desk.pay(order)
@@ -138,18 +148,27 @@ describe('the sweep', () => {
     await sweepPayments(desk.app.deps)
     await sweepPayments(desk.app.deps)
     expect((await desk.read(order)).status).toBe('released')
-    const missed = await desk.app.deps.db
-      .selectFrom('audit')
-      .select('after')
-      .where('action', '=', 'event missed')
-      .where('after', 'like', `%${session}%`)
-      .execute()
-    expect(missed).toHaveLength(1)
+    expect(await raised('event missed', session)).toBe(1)
     // The events come after all.
     for (const event of desk.eventsOf(session)) await desk.deliver(event)
     await desk.settled()
     expect(await desk.ledgerOf(order)).toEqual([-4200, 4200])
     expect(await desk.lettersOf(order)).toEqual(['deposit receipt'])
+    desk.app.setClock(START)
+  })
+
+  it('raises what differs from what was asked for, once, and settles nothing', async () => {
+    const order = await desk.order()
+    const session = await desk.pay(order)
+    desk.fake.pay(session, 'accept')
+    await desk.app.deps.db.updateTable('payments').set({ amount: 100 }).where('orderId', '=', order).execute()
+    desk.app.setClock(minutesLater(15))
+    await sweepPayments(desk.app.deps)
+    await sweepPayments(desk.app.deps)
+    expect(await raised('event missed', session)).toBe(1)
+    expect(await raised('payment differs', session)).toBe(1)
+    expect((await desk.read(order)).status).toBe('awaiting deposit')
+    expect(await desk.ledgerOf(order)).toEqual([])
     desk.app.setClock(START)
   })
 
