@@ -46,6 +46,8 @@ export function openDatabase(file: string): Db {
   database.pragma('foreign_keys = ON')
   database.pragma('busy_timeout = 5000')
   database.pragma('trusted_schema = OFF')
+  // Without it INSERT OR REPLACE deletes past the triggers that keep audit and ledger append-only.
+  database.pragma('recursive_triggers = ON')
   return new Kysely<Database>({
     dialect: new ImmediateDialect({ database }),
     plugins: [new CamelCasePlugin()],

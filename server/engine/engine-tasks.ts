@@ -14,7 +14,7 @@ import { EU_FAMILIES } from '../../shared/sections/catalogue.ts'
 import type { Section } from '../../shared/sections/section.ts'
 import { checkColumn } from '../../shared/standards/check-column.ts'
 import { prepareColumn } from '../../shared/standards/prepare-column.ts'
-import { Refusal, refuse } from '../../shared/units/refusal.ts'
+import { refuse } from '../../shared/units/refusal.ts'
 import { beginWork, workOut } from './quote-work.ts'
 
 export type { BegunLine, WorkedLine, WorkedQuote } from './quote-work.ts'
@@ -90,17 +90,12 @@ type Offer = RequestDto['lines'][number]['offered']
 
 /** What a list of lines would be made of; null for a line that cannot be taken, or that nothing fits. */
 function offer({ requirements, book }: { requirements: LineRequirement[]; book: PriceBook }): Offer[] {
+  const find = scheduler(catalogue, book)
   return requirements.map((asked) => {
-    try {
-      const found = propose({ asked, catalogue, book, delivery: null })
-      if (!found.found) return null
-      const unitPrice = found.price.lines[0]?.unitPrice
-      if (!unitPrice) return null
-      return { section: found.section, utilisation: found.check.utilisation, unitPrice }
-    } catch (error) {
-      if (error instanceof Refusal) return null
-      throw error
-    }
+    const { offered } = find({ asked, delivery: null })
+    if (!offered) return null
+    const { section, utilisation, unitPrice } = offered
+    return { section, utilisation, unitPrice }
   })
 }
 

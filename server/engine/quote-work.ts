@@ -39,13 +39,11 @@ export function beginWork({
   book: PriceBook
   km: number
 }): BegunLine[] {
-  const delivery = km > 0 ? { km } : null
+  const terms = { catalogue, book, delivery: km > 0 ? { km } : null, advise: false }
   return requirements.map((requirement, index) =>
     atLine(index, () => {
-      const first = propose({ asked: requirement, catalogue, book, delivery })
-      const found = first.found
-        ? first
-        : propose({ asked: requirement, catalogue, book, delivery, section: nearestOf(first) })
+      const first = propose({ ...terms, asked: requirement })
+      const found = first.found ? first : propose({ ...terms, asked: requirement, section: nearestOf(first) })
       if (!found.found) return refuse('section', found.reason)
       return { requirement, spec: found.spec, alternatives: found.alternatives }
     }),

@@ -59,6 +59,8 @@ export interface ProposalInput {
   delivery: { km: number } | null
   /** Left out: none. */
   tax?: { rate: string; exempt: boolean } | undefined
+  /** false: leave out what would make it cheaper, which takes as long as all the rest. */
+  advise?: boolean | undefined
   /** Another shape than the cheapest: the one to propose, whether it holds or not. */
   section?: string | undefined
 }
@@ -106,7 +108,7 @@ export function propose(input: ProposalInput): Proposal | NoProposal {
     ...{ base, spec },
     alternatives: alternativesOf(ranked),
     nextLighter: nextLighter(asked, chosen, screened, terms),
-    advice: ranked[0] ? adviceOf(input, ranked[0]) : [],
+    advice: ranked[0] && input.advise !== false ? adviceOf(input, ranked[0]) : [],
     price: priceQuote({
       ...{ book, delivery, lines: [{ spec, section }], discount: '0' },
       tax: input.tax ?? { rate: '0', exempt: false },

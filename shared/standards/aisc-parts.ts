@@ -6,11 +6,11 @@ import { effectiveArea } from './aisc360/effective-area.ts'
 import { localChecks } from './aisc360/local-check.ts'
 import { tensionCheck } from './aisc360/tension-check.ts'
 import { bendingChecks } from './bending-checks.ts'
-import type { StandardParts } from './check-column.ts'
 import type { AiscTerms } from './column-request.ts'
 import type { PreparedColumn } from './prepare-column.ts'
 import { compressionInput, type Screening } from './screen-column.ts'
 import type { BentScreening } from './screen-bending.ts'
+import type { StandardParts } from './standard-parts.ts'
 
 /** The checks of AISC 360 with their steps. */
 export function aiscParts(

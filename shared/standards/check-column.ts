@@ -12,22 +12,7 @@ import { checkFamily } from './families.ts'
 import { demandOf, type PreparedColumn } from './prepare-column.ts'
 import { requiredSteps } from './required-steps.ts'
 import { screenColumn, type Screening } from './screen-column.ts'
-
-export interface Governing {
-  check: string
-  axis: string
-  clause: string
-  combination: string
-}
-
-/** What a standard adds to a result. */
-export interface StandardParts {
-  /** Of the compression that governs, without its combination. */
-  governing: Omit<Governing, 'combination'>
-  tensionClause: string
-  values: Record<string, number | string>
-  checks: Check[]
-}
+import type { Governing, StandardParts } from './standard-parts.ts'
 
 /** The whole answer for one shape: verdict, lengths by both methods, every check with its steps. N, mm, MPa. */
 export interface ColumnCheck {

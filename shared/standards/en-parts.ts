@@ -1,12 +1,12 @@
 import type { Steel } from '../materials/steel.ts'
 import type { Section } from '../sections/section.ts'
-import type { StandardParts } from './check-column.ts'
 import { classOf } from './en1993/classification.ts'
 import { governingModeEn, modesEn, type ModeEn } from './en1993/compression.ts'
 import { bucklingCheckEn, classChecks, tensionCheckEn } from './en1993/checks.ts'
 import { effectiveAreaEn } from './en1993/effective-area.ts'
 import type { PreparedColumn } from './prepare-column.ts'
 import { lengthsOf, type Screening } from './screen-column.ts'
+import type { StandardParts } from './standard-parts.ts'
 
 /** The checks of EN 1993-1-1 with their steps. */
 export function enParts(

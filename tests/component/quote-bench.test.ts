@@ -26,7 +26,7 @@ function firstLine(call: DeskCall | undefined): Current['lines'][number]['spec']
 }
 
 async function bench(quote: QuoteDto, answer: Answer = () => undefined, actor = 'estimator') {
-  const desk = deskAnswering(answer)
+  const desk = deskAnswering(answer, /\/capacity$/)
   vi.stubGlobal('fetch', desk.fetch)
   const page = await mountPage(QuoteBench, { quote, actor })
   const field = (path: string) => page.wrapper.get<HTMLInputElement>(`[data-path="${path}"] input`)

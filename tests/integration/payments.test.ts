@@ -1,4 +1,5 @@
 import fc from 'fast-check'
+import { sql } from 'kysely'
 import Stripe from 'stripe'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import type { AnswerOf } from '../../shared/contracts/operations.ts'
@@ -274,5 +275,7 @@ describe('accounts', () => {
     ).rejects.toThrow(/balance/)
     await expect(db.updateTable('ledger').set({ amount: 1 }).execute()).rejects.toThrow(/never changed/)
     await expect(db.deleteFrom('ledger').execute()).rejects.toThrow(/never deleted/)
+    const overwrite = sql`INSERT OR REPLACE INTO ledger SELECT * FROM ledger LIMIT 1`.execute(db)
+    await expect(overwrite).rejects.toThrow(/never deleted/)
   })
 })

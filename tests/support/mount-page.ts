@@ -21,8 +21,8 @@ export function json(body: unknown, status = 200): Response {
   return new Response(JSON.stringify(body), { status })
 }
 
-/** A `fetch` that answers by hand and keeps what it was asked. */
-export function deskAnswering(answer: Answer): { fetch: typeof fetch; calls: DeskCall[] } {
+/** A `fetch` that answers by hand and keeps what it was asked. `aside`: paths that are not there, and beside the point. */
+export function deskAnswering(answer: Answer, aside?: RegExp): { fetch: typeof fetch; calls: DeskCall[] } {
   const calls: DeskCall[] = []
   return {
     calls,
@@ -36,6 +36,7 @@ export function deskAnswering(answer: Answer): { fetch: typeof fetch; calls: Des
         headers: init.headers as Record<string, string>,
         signal: init.signal ?? null,
       }
+      if (aside?.test(call.path)) return new Response(null, { status: 404 })
       calls.push(call)
       const found = await answer(call)
       if (!found) throw new Error(`nothing answers ${call.method} ${call.path}`)
