@@ -1,6 +1,8 @@
 import type { Money } from '../pricing/money.ts'
 import type { PriceBook } from '../pricing/price-book.ts'
 import type { Catalogue } from '../sections/catalogue.ts'
+import { scaleSolution, solveColumn, type ColumnSolution } from '../stability/column-lengths.ts'
+import type { Column } from '../stability/column.ts'
 import { prepareColumn, type PreparedColumn } from '../standards/prepare-column.ts'
 import { Refusal } from '../units/refusal.ts'
 import { familiesFor, limitsBroken, screenStock, stockOf, type Stocked } from './candidates.ts'
@@ -24,16 +26,15 @@ export interface ScheduleRow {
  * or a list of shapes in one steel, is worked out once. A line that cannot be taken says why, and stops no other.
  */
 export function scheduler(catalogue: Catalogue, book: PriceBook): (line: ScheduleLine) => ScheduleRow {
-  const prepared = remembered(prepareColumn)
+  const solve = solver()
   const stocks = remembered((key: { families: ReturnType<typeof familiesFor>; grade: LineAsked['grade'] }) =>
     stockOf(catalogue.ofFamilies(key.families), key.grade),
   )
   return ({ asked, delivery }) => {
     const { mark } = asked
     try {
-      const { limits: _, finish: __, base: ___, cap: ____, mark: _____, quantity: ______, ...column } = asked
       const stock = stocks({ families: familiesFor(asked, book), grade: asked.grade })
-      return rowOf(asked, prepared(column), stock, { book, delivery })
+      return rowOf(asked, prepareColumn(asked, solve), stock, { book, delivery })
     } catch (error) {
       if (!(error instanceof Refusal)) throw error
       return { mark, offered: null, reason: error.message }
@@ -58,6 +59,21 @@ function rowOf(
     mark,
     offered: { section: best.section.designation, utilisation, unitPrice, linePrice },
     reason: null,
+  }
+}
+
+/** Lengths of columns of one form, whatever their height, solved once. */
+function solver(): (column: Column) => ColumnSolution {
+  const known = new Map<string, { height: number; solution: ColumnSolution }>()
+  return (column) => {
+    const { height, ends, braces, endFixity } = column
+    const form = braces.map((brace) => ({ ...brace, height: brace.height / height }))
+    const key = JSON.stringify([ends, form, endFixity])
+    const before = known.get(key)
+    if (before) return scaleSolution(before.solution, height / before.height)
+    const solution = solveColumn(column)
+    known.set(key, { height, solution })
+    return solution
   }
 }
 

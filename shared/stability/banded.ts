@@ -33,7 +33,10 @@ export function hold(matrix: Band, index: number, diagonal: number): void {
 
 /** K − λG. */
 export function pencil(K: Band, G: Band, lambda: number): Band {
-  return { size: K.size, entries: K.entries.map((value, at) => value - lambda * (G.entries[at] ?? 0)) }
+  const entries = new Float64Array(K.entries.length)
+  for (let at = 0; at < entries.length; at++)
+    entries[at] = (K.entries[at] ?? 0) - lambda * (G.entries[at] ?? 0)
+  return { size: K.size, entries }
 }
 
 export function multiply(matrix: Band, vector: Float64Array): Float64Array {

@@ -52,3 +52,35 @@ export function lengthsWithStiffness(
 export function columnLengths(column: Column, EIstrong: number, EIweak: number): ColumnLengths {
   return lengthsWithStiffness(solveColumn(column), EIstrong, EIweak)
 }
+
+/**
+ * The solution of a column of the same form, its every height multiplied by `factor`: ends, braces and their springs all
+ * scale with it, so lengths do.
+ */
+export function scaleSolution({ strong, weak, torsion }: ColumnSolution, factor: number): ColumnSolution {
+  const scale = (one: LengthSolution): LengthSolution => ({
+    segment: one.segment * factor,
+    eigenvalue: one.eigenvalue * factor,
+    used: one.used * factor,
+    governedBy: one.governedBy,
+    segments: one.segments.map(({ from, to, k, kl }) => ({
+      from: from * factor,
+      to: to * factor,
+      k,
+      kl: kl === null ? null : kl * factor,
+    })),
+    shape: one.shape.map(([height, deflection]) => [height * factor, deflection]),
+  })
+  return {
+    strong: scale(strong),
+    weak: scale(weak),
+    torsion: {
+      used: torsion.used * factor,
+      segments: torsion.segments.map(({ from, to, length }) => ({
+        from: from * factor,
+        to: to * factor,
+        length: length * factor,
+      })),
+    },
+  }
+}

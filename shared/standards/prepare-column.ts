@@ -114,14 +114,20 @@ function extremeOf(combinations: readonly [Combination, ...Combination[]]): [Com
   return [first, ...rest]
 }
 
-/** Checks a request and solves what no shape changes. Refuses what cannot be taken, naming every field. */
-export function prepareColumn(request: ColumnRequest): PreparedColumn {
+/**
+ * Checks a request and solves what no shape changes. Refuses what cannot be taken, naming every field. `solve`: how
+ * lengths are found, where many columns of one form are asked for.
+ */
+export function prepareColumn(
+  request: ColumnRequest,
+  solve: (column: Column) => ColumnSolution = solveColumn,
+): PreparedColumn {
   const issues = requestIssues(request)
   const terms = termsOf(request)
   const column = columnOf(request)
   const { lengths } = request
   if (issues.length > 0 || Array.isArray(terms)) throw new Refusal(issues)
-  const solution = lengths ? givenSolution(lengths) : column && solveColumn(column)
+  const solution = lengths ? givenSolution(lengths) : column && solve(column)
   if (!solution) throw new Refusal([{ path: 'height', message: 'give the height of the column in mm' }])
   const combinations = combinationsOf(request, terms)
   const weighed = request.selfWeight !== false && !request.required
