@@ -1,6 +1,7 @@
 import { steelFor } from '../materials/steel-for.ts'
 import type { Steel } from '../materials/steel.ts'
 import { barPriceOf, type PriceBook } from '../pricing/price-book.ts'
+import { US_FAMILIES } from '../sections/catalogue.ts'
 import type { Family, Section } from '../sections/section.ts'
 import type { PreparedColumn } from '../standards/prepare-column.ts'
 import { familiesOf } from '../standards/families.ts'
@@ -33,12 +34,16 @@ export interface Stocked {
 /** Shapes of these families, each in the steel that was asked. Refuses a grade that none of them is made of. */
 export function stockOf(sections: readonly Section[], grade: LineAsked['grade']): Stocked[] {
   const stock: Stocked[] = []
+  // US steels are a family's, European ones depend on thickness.
+  const usual = new Map<Family, Steel>()
   // A steel that one shape of a family is not made of, none of it is.
   const faults = new Map<Family, Refusal>()
   for (const section of sections) {
     if (faults.has(section.family)) continue
     try {
-      stock.push({ section, steel: steelFor(grade, section) })
+      const steel = usual.get(section.family) ?? steelFor(grade, section)
+      if (US_FAMILIES.includes(section.family)) usual.set(section.family, steel)
+      stock.push({ section, steel })
     } catch (error) {
       if (!(error instanceof Refusal)) throw error
       if (error.issues.some(({ path }) => path.startsWith('grade'))) faults.set(section.family, error)
