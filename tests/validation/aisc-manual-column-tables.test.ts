@@ -114,3 +114,40 @@ describe('ANSI/AISC 360-22, Table E7.1', () => {
     expect(Math.abs(c2Of(c1) - printed)).toBeLessThanOrEqual(0.011)
   })
 })
+
+/** One mode by itself: φPn of a section with different lengths, kip. */
+function strengthOf(designation: string, Fy: number, feet: { strong: number; weak: number }) {
+  const section = catalogue.find(designation)
+  if (!section) throw new Error(`no ${designation}`)
+  const input = {
+    ...{ E: E_AISC, G: G_AISC, Fy: Fy * KSI },
+    ...{ strong: feet.strong * FOOT, weak: feet.weak * FOOT, torsion: feet.weak * FOOT },
+  }
+  const mode = governingMode(bucklingModes(section, input))
+  return nominalCompression(section, mode, E_AISC, Fy * KSI) / KIP
+}
+
+describe('AISC Design Examples v15, chapter E (figures from memory; v14 where said)', () => {
+  it('E.1A: W14X132, 30 ft, pinned: Pn/Ω = 594 kip', () => {
+    const nominal = strengthOf('W14X132', 50, { strong: 30, weak: 30 })
+    expect(Math.abs(available(nominal, FACTORS.compression, 'ASD') - 594)).toBeLessThanOrEqual(1.5)
+  })
+  it('E.1B: W14X90, 30 ft, weak axis and twist held at mid-height: Pn/Ω = 618 kip', () => {
+    const nominal = strengthOf('W14X90', 50, { strong: 30, weak: 15 })
+    expect(Math.abs(available(nominal, FACTORS.compression, 'ASD') - 618)).toBeLessThanOrEqual(2)
+  })
+  it('E.9 (v14): HSS12X10X3/8, Fy = 46 ksi, 16 ft: φPn = 518 kip', () => {
+    const nominal = strengthOf('HSS12X10X3/8', 46, { strong: 16, weak: 16 })
+    expect(Math.abs(available(nominal, FACTORS.compression, 'LRFD') - 518)).toBeLessThanOrEqual(2)
+  })
+  it('E.10: HSS12X8X3/16, Fy = 50 ksi, 24 ft, slender walls: φPn = 151 kip', () => {
+    const nominal = strengthOf('HSS12X8X3/16', 50, { strong: 24, weak: 24 })
+    expect(Math.abs(available(nominal, FACTORS.compression, 'LRFD') - 151)).toBeLessThanOrEqual(2)
+  })
+})
+
+describe('OpenStax CNX m10711: W14X74, Fy = 36 ksi, 20 ft, φ = 0.85', () => {
+  it('carries 408 kip', () => {
+    expect(Math.abs(0.85 * strengthOf('W14X74', 36, { strong: 20, weak: 20 }) - 408)).toBeLessThanOrEqual(1)
+  })
+})
