@@ -1,7 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { catalogue } from '../../seeds/reference/catalogue.ts'
 import { availableBearing } from '../../shared/base/bearing.ts'
-import { availableBearing } from '../../shared/base/bearing.ts'
 import { designBase } from '../../shared/base/design-base.ts'
 import { erectionMoment, erectionTension, rodAvailable } from '../../shared/base/rods.ts'
 
