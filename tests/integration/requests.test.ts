@@ -94,4 +94,28 @@ describe('a request', () => {
     const refused = await contractor.post(`/api/requests/${id}/submit`).set('If-Match', '"1"').expect(422)
     expect(refused.body).toMatchObject({ errors: [{ path: 'shipTo.region' }] })
   })
+
+  it('is listed newest first, page by page, and found by a part of its words', async () => {
+    type Page = AnswerOf<'listRequests'>
+    for (const title of ['Granary', 'Boathouse 100%', 'Boathouse']) {
+      await contractor
+        .post('/api/requests')
+        .set('Idempotency-Key', key())
+        .send({ ...requestBody(), title })
+        .expect(201)
+    }
+    const first = (await contractor.get('/api/requests?limit=2').expect(200)).body as Page
+    expect(first.items.map(({ title }) => title)).toEqual(['Boathouse', 'Boathouse 100%'])
+    const rest = (await contractor.get(`/api/requests?limit=50&cursor=${first.nextCursor}`).expect(200))
+      .body as Page
+    expect(rest.items[0]?.title).toBe('Granary')
+    const ids = [...first.items, ...rest.items].map(({ id }) => id)
+    expect(new Set(ids).size).toBe(ids.length)
+    const found = (await contractor.get('/api/requests?q=boathouse').expect(200)).body as Page
+    expect(found.items).toHaveLength(2)
+    const literal = (await contractor.get(`/api/requests?q=${encodeURIComponent('100%')}`).expect(200))
+      .body as Page
+    expect(literal.items.map(({ title }) => title)).toEqual(['Boathouse 100%'])
+    await contractor.get('/api/requests?cursor=nonsense').expect(422)
+  })
 })

@@ -1,5 +1,6 @@
 import type { Insertable } from 'kysely'
 import type { Cursor } from '../../db/cursor.ts'
+import { containsText, olderThan } from '../../db/list-conditions.ts'
 import type { Reader, Trx } from '../../db/open-database.ts'
 import type { Account, LedgerTable } from './accounts.table.ts'
 
@@ -29,14 +30,9 @@ export function entriesBefore(
   const { account, text, cursor, limit } = wanted
   return entries(db)
     .$if(account !== undefined, (query) => query.where('ledger.account', '=', account ?? 'bank'))
-    .$if(!!text, (query) => query.where('ledger.memo', 'like', `%${text}%`))
+    .$if(!!text, (query) => query.where(containsText(text ?? '', 'ledger.memo')))
     .$if(cursor !== undefined, (query) =>
-      query.where((is) =>
-        is.or([
-          is('ledger.at', '<', cursor?.at ?? ''),
-          is.and([is('ledger.at', '=', cursor?.at ?? ''), is('ledger.id', '<', cursor?.id ?? '')]),
-        ]),
-      ),
+      cursor ? query.where(olderThan('ledger.at', 'ledger.id', cursor)) : query,
     )
     .orderBy('ledger.at', 'desc')
     .orderBy('ledger.id', 'desc')
@@ -81,18 +77,9 @@ export function deposits(db: Reader, cursor: Cursor | undefined, text: string | 
         .where('payments.status', '=', 'succeeded')
         .as('paid'),
     )
-    .$if(!!text, (query) =>
-      query.where((is) =>
-        is.or([is('orders.number', 'like', `%${text}%`), is('companies.name', 'like', `%${text}%`)]),
-      ),
-    )
+    .$if(!!text, (query) => query.where(containsText(text ?? '', 'orders.number', 'companies.name')))
     .$if(cursor !== undefined, (query) =>
-      query.where((is) =>
-        is.or([
-          is('orders.acceptedAt', '<', cursor?.at ?? ''),
-          is.and([is('orders.acceptedAt', '=', cursor?.at ?? ''), is('orders.id', '<', cursor?.id ?? '')]),
-        ]),
-      ),
+      cursor ? query.where(olderThan('orders.acceptedAt', 'orders.id', cursor)) : query,
     )
     .orderBy('orders.acceptedAt', 'desc')
     .orderBy('orders.id', 'desc')

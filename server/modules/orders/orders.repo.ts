@@ -1,6 +1,7 @@
 import type { Insertable, Selectable } from 'kysely'
 import type { OrderStatus } from '../../../shared/quoting/statuses.ts'
 import type { Cursor } from '../../db/cursor.ts'
+import { containsText, olderThan } from '../../db/list-conditions.ts'
 import type { Reader, Trx } from '../../db/open-database.ts'
 import type { OrderProgressTable, OrdersTable } from './orders.table.ts'
 
@@ -40,21 +41,10 @@ export function findOrders(db: Reader, wanted: OrdersWanted): Promise<OrderRow[]
     .$if(companyId !== undefined, (query) => query.where('orders.companyId', '=', companyId ?? ''))
     .$if(status !== undefined, (query) => query.where('orders.status', '=', status ?? 'released'))
     .$if(!!text, (query) =>
-      query.where((is) =>
-        is.or([
-          is('orders.number', 'like', `%${text}%`),
-          is('orders.title', 'like', `%${text}%`),
-          is('companies.name', 'like', `%${text}%`),
-        ]),
-      ),
+      query.where(containsText(text ?? '', 'orders.number', 'orders.title', 'companies.name')),
     )
     .$if(cursor !== undefined, (query) =>
-      query.where((is) =>
-        is.or([
-          is('orders.acceptedAt', '<', cursor?.at ?? ''),
-          is.and([is('orders.acceptedAt', '=', cursor?.at ?? ''), is('orders.id', '<', cursor?.id ?? '')]),
-        ]),
-      ),
+      cursor ? query.where(olderThan('orders.acceptedAt', 'orders.id', cursor)) : query,
     )
     .orderBy('orders.acceptedAt', 'desc')
     .orderBy('orders.id', 'desc')

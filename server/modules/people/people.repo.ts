@@ -1,5 +1,6 @@
 import type { Insertable } from 'kysely'
 import type { Cursor } from '../../db/cursor.ts'
+import { containsText } from '../../db/list-conditions.ts'
 import type { Reader, Trx } from '../../db/open-database.ts'
 import type { PeopleTable } from './people.table.ts'
 
@@ -35,11 +36,7 @@ export function peopleAfter(
         ]),
       ),
     )
-    .$if(text !== undefined && text !== '', (query) =>
-      query.where((is) =>
-        is.or([is('people.name', 'like', `%${text}%`), is('people.email', 'like', `%${text}%`)]),
-      ),
-    )
+    .$if(!!text, (query) => query.where(containsText(text ?? '', 'people.name', 'people.email')))
     .orderBy('people.name')
     .orderBy('people.id')
     .limit(limit)

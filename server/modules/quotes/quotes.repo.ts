@@ -1,6 +1,7 @@
 import type { Insertable, Selectable, Updateable } from 'kysely'
 import type { RevisionStatus } from '../../../shared/quoting/statuses.ts'
 import type { Cursor } from '../../db/cursor.ts'
+import { containsText, olderThan } from '../../db/list-conditions.ts'
 import type { Reader, Trx } from '../../db/open-database.ts'
 import type { QuotesTable, RevisionsTable } from './quotes.table.ts'
 
@@ -55,21 +56,10 @@ export function findQuotes(db: Reader, wanted: QuotesWanted) {
     .$if(companyId !== undefined, (query) => query.where('quotes.companyId', '=', companyId ?? ''))
     .$if(status !== undefined, (query) => query.where('revisions.status', '=', status ?? 'draft'))
     .$if(!!text, (query) =>
-      query.where((is) =>
-        is.or([
-          is('quotes.number', 'like', `%${text}%`),
-          is('requests.title', 'like', `%${text}%`),
-          is('companies.name', 'like', `%${text}%`),
-        ]),
-      ),
+      query.where(containsText(text ?? '', 'quotes.number', 'requests.title', 'companies.name')),
     )
     .$if(cursor !== undefined, (query) =>
-      query.where((is) =>
-        is.or([
-          is('quotes.createdAt', '<', cursor?.at ?? ''),
-          is.and([is('quotes.createdAt', '=', cursor?.at ?? ''), is('quotes.id', '<', cursor?.id ?? '')]),
-        ]),
-      ),
+      cursor ? query.where(olderThan('quotes.createdAt', 'quotes.id', cursor)) : query,
     )
     .orderBy('quotes.createdAt', 'desc')
     .orderBy('quotes.id', 'desc')

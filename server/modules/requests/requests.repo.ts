@@ -1,6 +1,7 @@
 import type { Insertable, Updateable } from 'kysely'
 import type { RequestStatus } from '../../../shared/quoting/statuses.ts'
 import type { Cursor } from '../../db/cursor.ts'
+import { containsText, olderThan } from '../../db/list-conditions.ts'
 import type { Reader, Trx } from '../../db/open-database.ts'
 import type { RequestsTable } from './requests.table.ts'
 
@@ -36,21 +37,10 @@ export function findRequests(db: Reader, wanted: RequestsWanted): Promise<Reques
     .$if(companyId === undefined, (query) => query.where('requests.status', '!=', 'draft'))
     .$if(status !== undefined, (query) => query.where('requests.status', '=', status ?? 'draft'))
     .$if(!!text, (query) =>
-      query.where((is) =>
-        is.or([
-          is('requests.number', 'like', `%${text}%`),
-          is('requests.title', 'like', `%${text}%`),
-          is('companies.name', 'like', `%${text}%`),
-        ]),
-      ),
+      query.where(containsText(text ?? '', 'requests.number', 'requests.title', 'companies.name')),
     )
     .$if(cursor !== undefined, (query) =>
-      query.where((is) =>
-        is.or([
-          is('requests.createdAt', '<', cursor?.at ?? ''),
-          is.and([is('requests.createdAt', '=', cursor?.at ?? ''), is('requests.id', '<', cursor?.id ?? '')]),
-        ]),
-      ),
+      cursor ? query.where(olderThan('requests.createdAt', 'requests.id', cursor)) : query,
     )
     .orderBy('requests.createdAt', 'desc')
     .orderBy('requests.id', 'desc')
