@@ -66,7 +66,12 @@ function totals(sheet: Sheet, { price }: QuoteDocument['quote']['current']): voi
   const beforeTax = { ...total, amount: total.amount - tax.amount.amount }
   const taxName = tax.exempt ? 'Tax, exempt by certificate' : `Tax ${rateText(tax.rate)}`
   const rows: [string, string][] = [
-    [`Delivery, ${Math.round(delivery.km)} km, ${trucks}`, moneyText(delivery.price)],
+    [
+      delivery.trucks === 0
+        ? 'Collected from the shop'
+        : `Delivery, ${Math.round(delivery.km)} km, ${trucks}`,
+      moneyText(delivery.price),
+    ],
     ['Before tax', moneyText(beforeTax)],
     [taxName, moneyText(tax.amount)],
     ['Total', moneyText(total)],
