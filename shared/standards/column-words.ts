@@ -29,7 +29,8 @@ export function assumptionsOf(prepared: PreparedColumn, steel: Steel): string[] 
     if (request.loads && request.combinations === undefined) {
       said.push(`Loads are combined by ${combinations}, every sign of wind and earthquake.`)
     }
-    if (request.loads?.live && request.liveFactor === undefined) {
+    // Allowable stress design has no f1.
+    if (method === 'LRFD' && request.loads?.live && request.liveFactor === undefined) {
       said.push(
         `Live load beside other loads counts at f1 = ${liveFactor}; say so for garages, assembly or more than 100 psf.`,
       )
@@ -37,8 +38,11 @@ export function assumptionsOf(prepared: PreparedColumn, steel: Steel): string[] 
   }
   if (request.grade === undefined) said.push(`Steel is ${steel.title}.`)
   if (request.required) said.push('The required strength is taken as already combined, own weight included.')
-  else if (request.selfWeight !== false && request.height !== undefined)
-    said.push('The weight of the column itself is added to the dead load.')
+  else if (prepared.weighedHeight > 0) said.push('The weight of the column itself is added to the dead load.')
+  else if (request.selfWeight !== false)
+    said.push(
+      'The weight of the column itself is left out, as no height is given: count it in the dead load.',
+    )
   if (request.lengths) said.push('Effective lengths are taken as given; no length was worked out.')
   else if ((request.endFixity ?? 'recommended') === 'recommended')
     said.push('Effective length factors are the recommended ones: no fixed end is ideally rigid.')
@@ -67,11 +71,11 @@ export function warningsOf(
   const most = Math.max(strong, weak)
   if (most > ADVISED_COMPRESSION_SLENDERNESS) {
     warnings.push(
-      `Lc/r is ${most.toFixed(0)}, more than the ${ADVISED_COMPRESSION_SLENDERNESS} that E2 advises: it is slender to handle and to erect.`,
+      `Lc/r is ${most.toFixed(0)}, more than the ${ADVISED_COMPRESSION_SLENDERNESS} that AISC 360 E2 advises: it is slender to handle and to erect.`,
     )
   }
   if (uplift > 0 && most > ADVISED_TENSION_SLENDERNESS) {
-    warnings.push(`In uplift Lc/r is more than the ${ADVISED_TENSION_SLENDERNESS} that D1 advises.`)
+    warnings.push(`In uplift Lc/r is more than the ${ADVISED_TENSION_SLENDERNESS} that AISC 360 D1 advises.`)
   }
   if (prepared.bending && fixedAtFoot(prepared)) {
     warnings.push(
