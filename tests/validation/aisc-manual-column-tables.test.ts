@@ -8,6 +8,7 @@ import {
   governingMode,
   nominalCompression,
 } from '../../shared/standards/aisc360/compression.ts'
+import type { ISection } from '../../shared/sections/section.ts'
 import { E_AISC, G_AISC } from '../../shared/materials/steel.ts'
 
 const KIP = 4448.2216152605
@@ -149,5 +150,39 @@ describe('AISC Design Examples v15, chapter E (figures from memory; v14 where sa
 describe('OpenStax CNX m10711: W14X74, Fy = 36 ksi, 20 ft, φ = 0.85', () => {
   it('carries 408 kip', () => {
     expect(Math.abs(0.85 * strengthOf('W14X74', 36, { strong: 20, weak: 20 }) - 408)).toBeLessThanOrEqual(1)
+  })
+})
+
+/** Three plates welded to an I: flanges b × tf and a web hw × tw, in inches; only what compression needs. */
+function plates(b: number, tf: number, hw: number, tw: number): ISection {
+  const ho = hw + tf
+  const area = 2 * b * tf + hw * tw
+  const Ix = (b * (hw + 2 * tf) ** 3 - (b - tw) * hw ** 3) / 12
+  const Iy = (2 * tf * b ** 3 + hw * tw ** 3) / 12
+  const J = (2 * b * tf ** 3 + hw * tw ** 3) / 3
+  const inch = 25.4
+  return {
+    ...{ designation: 'welded', designationSI: 'welded', family: 'W', shape: 'I', builtUp: true },
+    ...{ mass: area * inch ** 2 * 0.00785, area: area * inch ** 2, perimeter: 0, fillet: 0 },
+    ...{ depth: (hw + 2 * tf) * inch, width: b * inch, tf: tf * inch, tw: tw * inch, ho: ho * inch },
+    ...{ Ix: Ix * inch ** 4, rx: Math.sqrt(Ix / area) * inch, Iy: Iy * inch ** 4 },
+    ...{ ry: Math.sqrt(Iy / area) * inch, J: J * inch ** 4, Cw: ((Iy * ho ** 2) / 4) * inch ** 6 },
+    ...{ Sx: 0, Zx: 0, Sy: 0, Zy: 0, rts: 0, flangeRatio: b / (2 * tf), webRatio: hw / tw },
+  }
+}
+
+describe('AISC Design Examples v15, E.2 (plates and figure from memory)', () => {
+  it('flanges 1 × 8 in, web 1/4 × 15 in, slender, Fy = 50 ksi, 15 ft: φPn = 500 kip', () => {
+    const length = 15 * FOOT
+    const input = { E: E_AISC, G: G_AISC, Fy: 50 * KSI, strong: length, weak: length, torsion: length }
+    const section = plates(8, 1, 15, 0.25)
+    const nominal = nominalCompression(
+      section,
+      governingMode(bucklingModes(section, input)),
+      E_AISC,
+      50 * KSI,
+    )
+    expect(nominal).toBeLessThan(governingMode(bucklingModes(section, input)).Fn * section.area)
+    expect(Math.abs(available(nominal, FACTORS.compression, 'LRFD') / KIP - 500)).toBeLessThanOrEqual(4)
   })
 })
